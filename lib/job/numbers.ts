@@ -28,7 +28,7 @@ export const id = z.string().regex(/^[A-Za-z0-9_-]{1,40}$/);
 export const displayName = z
   .string()
   .max(200)
-  // eslint-disable-next-line no-control-regex
+
   .regex(/^[^\u0000-\u001f\u007f]*$/);
 
 export const face = z.enum(['A', 'B']);
