@@ -1,0 +1,5 @@
+// @ts-check
+import { runCommand } from './setup/command-line.mjs';
+import { runApp } from './setup/run-app.mjs';
+
+await runCommand((shutdown) => runApp('dev', shutdown));

@@ -1,0 +1,92 @@
+// @ts-check
+import { readFileSync, readdirSync, readlinkSync } from 'node:fs';
+
+/**
+ * @param {number} pid
+ * @returns {boolean} whether a process of this number exists, ours or not
+ */
+export function isAlive(pid) {
+  if (!Number.isSafeInteger(pid) || pid <= 0) return false;
+  try {
+    process.kill(pid, 0);
+    return true;
+  } catch (error) {
+    return /** @type {NodeJS.ErrnoException} */ (error).code === 'EPERM';
+  }
+}
+
+/**
+ * What tells a process from a later one that got the same number: its start in clock ticks since boot, with the boot's
+ * own id. Null where the system has no /proc, or the process is gone.
+ *
+ * @param {number} pid
+ * @returns {string | null}
+ */
+export function birthMark(pid) {
+  try {
+    const boot = readFileSync('/proc/sys/kernel/random/boot_id', 'utf8').trim();
+    const start = startTicks(readFileSync(`/proc/${pid}/stat`, 'utf8'));
+    return start === null ? null : `${boot}/${start}`;
+  } catch {
+    return null;
+  }
+}
+
+/**
+ * Field 22 (starttime) of a /proc/PID/stat line, see proc(5). The second field is the program's name in parentheses and
+ * may itself hold spaces and parentheses, so fields count from the last closing one.
+ *
+ * @param {string} line
+ * @returns {string | null}
+ */
+export function startTicks(line) {
+  const afterName = line.slice(line.lastIndexOf(')') + 2).split(' ');
+  return afterName[22 - 3] ?? null;
+}
+
+/**
+ * @param {number} pid
+ * @returns {string | null} the program's short name as the kernel has it
+ */
+export function programName(pid) {
+  try {
+    return readFileSync(`/proc/${pid}/comm`, 'utf8').trim();
+  } catch {
+    return null;
+  }
+}
+
+/**
+ * Processes of one program that work in a folder. A PostgreSQL server and each of its backends has its data folder as
+ * working folder, so this finds them even when the server's own pid file is wrong.
+ *
+ * @param {string} folder
+ * @param {string} program
+ * @returns {number[]}
+ */
+export function processesWorkingIn(folder, program) {
+  return processNumbers().filter((pid) => programName(pid) === program && workingFolder(pid) === folder);
+}
+
+/** @returns {number[]} */
+function processNumbers() {
+  try {
+    return readdirSync('/proc')
+      .filter((name) => /^\d+$/.test(name))
+      .map(Number);
+  } catch {
+    return [];
+  }
+}
+
+/**
+ * @param {number} pid
+ * @returns {string | null}
+ */
+function workingFolder(pid) {
+  try {
+    return readlinkSync(`/proc/${pid}/cwd`);
+  } catch {
+    return null;
+  }
+}
