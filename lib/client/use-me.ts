@@ -1,5 +1,6 @@
 import { useQuery, useQueryClient } from '@tanstack/react-query';
-import { me, type Me } from '@/lib/contracts/account';
+import type { Me } from '@/lib/contracts/account';
+import { ENDPOINTS } from '@/lib/contracts/endpoints';
 import { ApiError } from './api-error';
 import { callApi } from './call-api';
 
@@ -18,7 +19,7 @@ export function useForgetAccount(): () => void {
 
 async function fetchMe(signal: AbortSignal): Promise<Me | null> {
   try {
-    return await callApi('/api/me', me, { signal });
+    return await callApi(ENDPOINTS.me, {}, { signal });
   } catch (error) {
     if (error instanceof ApiError && error.code === 'not-signed-in') return null;
     throw error;
