@@ -38,19 +38,23 @@ export function spawnTied(program, args, options = {}) {
 }
 
 /**
- * Runs a program to its end.
+ * Runs a program to its end, in a group of its own so that it can be stopped with all that it has started.
  *
  * @param {string} program
  * @param {readonly string[]} args
- * @param {ChildOptions & { shutdown?: import('./shutdown.mjs').Shutdown }} [options]
+ * @param {ChildOptions & { shutdown?: import('./shutdown.mjs').Shutdown, limit?: number }} [options] limit: milliseconds
+ *   after which it is stopped
  * @returns {Promise<{ code: number, output: string }>} output: what it wrote to a piped stdout and stderr
  */
 export async function runToEnd(program, args, options = {}) {
-  const child = spawnTied(program, args, options);
-  const forget = options.shutdown?.onStop(() => stopChild(child, 'SIGTERM', 5_000));
+  const child = spawnTied(program, args, { ...options, ownGroup: true });
+  const stop = () => stopGroup(child, 'SIGTERM', 5_000);
+  const forget = options.shutdown?.onStop(stop);
+  const timer = options.limit === undefined ? undefined : setTimeout(stop, options.limit);
   let output = '';
   for (const stream of [child.stdout, child.stderr]) stream?.on('data', (chunk) => (output += chunk));
   const code = await exitOf(child);
+  clearTimeout(timer);
   forget?.();
   return { code, output };
 }
@@ -90,12 +94,47 @@ export function exitOf(child) {
  * @param {NodeJS.Signals} signal
  * @param {number} patience milliseconds
  */
-export async function stopChild(child, signal, patience) {
+export function stopChild(child, signal, patience) {
+  return stopBy((name) => child.kill(name), child, signal, patience);
+}
+
+/**
+ * The same for a child with `ownGroup` and everything that it has started.
+ *
+ * @param {import('node:child_process').ChildProcess} child
+ * @param {NodeJS.Signals} signal
+ * @param {number} patience milliseconds
+ */
+export function stopGroup(child, signal, patience) {
+  const { pid } = child;
+  if (pid === undefined) return Promise.resolve();
+  return stopBy((name) => signalGroup(pid, name), child, signal, patience);
+}
+
+/**
+ * @param {(name: NodeJS.Signals) => unknown} send
+ * @param {import('node:child_process').ChildProcess} child
+ * @param {NodeJS.Signals} signal
+ * @param {number} patience
+ */
+async function stopBy(send, child, signal, patience) {
   if (child.exitCode !== null || child.signalCode !== null) return;
-  child.kill(signal);
-  const timer = setTimeout(() => child.kill('SIGKILL'), patience);
+  send(signal);
+  const timer = setTimeout(() => send('SIGKILL'), patience);
   await exitOf(child);
   clearTimeout(timer);
+}
+
+/**
+ * @param {number} pid of the group's first process
+ * @param {NodeJS.Signals} name
+ */
+function signalGroup(pid, name) {
+  try {
+    process.kill(-pid, name);
+  } catch (error) {
+    if (/** @type {NodeJS.ErrnoException} */ (error).code !== 'ESRCH') throw error;
+  }
 }
 
 /**

@@ -1,7 +1,7 @@
 // @ts-check
 import { closeSync, openSync, readFileSync, rmSync } from 'node:fs';
 import { setTimeout as wait } from 'node:timers/promises';
-import { spawnTied, stopChild } from './child-process.mjs';
+import { spawnTied, stopGroup } from './child-process.mjs';
 import { firstFreePort } from './free-port.mjs';
 import { nextProgram } from './next-build.mjs';
 import { PlainError } from './plain-error.mjs';
@@ -17,7 +17,7 @@ const PATIENCE = 120_000;
  * @property {(address: string) => NodeJS.ProcessEnv} envFor
  * @property {import('./shutdown.mjs').Shutdown} shutdown
  */
-/** @typedef {{ address: string, ended: Promise<number> }} NextServer */
+/** @typedef {{ address: string, ended: Promise<number>, stop: () => Promise<void> }} NextServer */
 
 /**
  * Serves the app on the first free port of loopback and waits until it answers.
@@ -58,16 +58,17 @@ async function tryPort(root, { mode, log, envFor, shutdown }, port) {
     },
   );
   if (logFile !== null) closeSync(logFile);
-  const forget = shutdown.onStop(() => stopChild(child, 'SIGTERM', 10_000));
+  const stop = () => stopGroup(child, 'SIGTERM', 10_000);
+  const forget = shutdown.onStop(stop);
   /** @type {Promise<number>} */
   const ended = new Promise((resolve) => {
     child.once('error', () => resolve(127));
     child.once('exit', (code) => resolve(code ?? 128));
   });
 
-  if (await answersBefore(address, ended)) return { address, ended };
+  if (await answersBefore(address, ended)) return { address, ended, stop };
   forget();
-  await stopChild(child, 'SIGTERM', 10_000);
+  await stop();
   const said = log ? readFileSync(log, 'utf8') : '';
   if (said.includes('EADDRINUSE')) return null;
   throw new PlainError(`The app does not answer at ${address}.${said ? ` It said:\n${said.trim()}` : ''}`);

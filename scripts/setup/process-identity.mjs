@@ -48,7 +48,7 @@ export function startTicks(line) {
  * @param {number} pid
  * @returns {string | null} the program's short name as the kernel has it
  */
-export function programName(pid) {
+function programName(pid) {
   try {
     return readFileSync(`/proc/${pid}/comm`, 'utf8').trim();
   } catch {
@@ -68,6 +68,18 @@ export function processesWorkingIn(folder, program) {
   return processNumbers().filter((pid) => programName(pid) === program && workingFolder(pid) === folder);
 }
 
+/**
+ * @param {number} pid
+ * @returns {string | null} null when it is gone, or not ours to look at
+ */
+export function workingFolder(pid) {
+  try {
+    return readlinkSync(`/proc/${pid}/cwd`);
+  } catch {
+    return null;
+  }
+}
+
 /** @returns {number[]} */
 function processNumbers() {
   try {
@@ -76,17 +88,5 @@ function processNumbers() {
       .map(Number);
   } catch {
     return [];
-  }
-}
-
-/**
- * @param {number} pid
- * @returns {string | null}
- */
-function workingFolder(pid) {
-  try {
-    return readlinkSync(`/proc/${pid}/cwd`);
-  } catch {
-    return null;
   }
 }
