@@ -28,9 +28,9 @@ export const Project = defineEntity({
     /** Counts saves of the document; a save names the version it was made from. */
     version: p.integer(),
     jobHash: p.string().length(64),
-    boardX: p.double(),
-    boardY: p.double(),
-    boardZ: p.double(),
+    boardX: p.double().$type<number>(),
+    boardY: p.double().$type<number>(),
+    boardZ: p.double().$type<number>(),
     material: p.string().length(80),
     savedAt: p.datetime(3),
     savedBy: () => p.manyToOne(User).ref().nullable().deleteRule('set null'),

@@ -19,11 +19,12 @@ export interface Endpoint<
   Query extends z.ZodType = z.ZodType,
   Body extends z.ZodType = z.ZodType,
   Answer extends z.ZodType = z.ZodType,
+  Who extends Access = Access,
 > {
   readonly method: Method;
   /** With its parameters in braces: `/api/projects/{projectId}`. */
   readonly path: `/api/${string}`;
-  readonly access: Access;
+  readonly access: Who;
   readonly summary: string;
   readonly params: Params;
   readonly query: Query;
@@ -56,10 +57,11 @@ export function endpoint<
   Query extends z.ZodType = typeof none,
   Body extends z.ZodType = typeof nothing,
   Answer extends z.ZodType = typeof nothing,
+  Who extends Access = Access,
 >(
   method: Method,
   path: `/api/${string}`,
-  access: Access,
+  access: Who,
   rest: {
     readonly summary: string;
     readonly params?: Params;
@@ -70,7 +72,7 @@ export function endpoint<
     readonly mediaType?: string;
     readonly bodyLimit?: number;
   },
-): Endpoint<Params, Query, Body, Answer> {
+): Endpoint<Params, Query, Body, Answer, Who> {
   return {
     method,
     path,

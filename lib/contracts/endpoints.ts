@@ -13,9 +13,10 @@ import * as revision from './revision';
 import type { ProjectPermission } from './roles';
 import * as shop from './shop';
 
-const PUBLIC: Access = { kind: 'public' };
-const SIGNED_IN: Access = { kind: 'signed-in' };
-const inProject = (permission: ProjectPermission): Access => ({ kind: 'project', permission });
+const PUBLIC = { kind: 'public' } as const satisfies Access;
+const SIGNED_IN = { kind: 'signed-in' } as const satisfies Access;
+const MANAGES_CUTTERS = { kind: 'shop', permission: 'shop.manage-cutters' } as const satisfies Access;
+const inProject = (permission: ProjectPermission) => ({ kind: 'project', permission }) as const;
 
 const projectParams = z.strictObject({ projectId: recordId });
 const memberParams = projectParams.extend({ userId: recordId });
@@ -242,37 +243,22 @@ export const ENDPOINTS = {
     summary: 'Cutters of one’s shops',
     answer: shop.shopCutters,
   }),
-  createShopCutter: endpoint(
-    'POST',
-    '/api/shop/cutters',
-    { kind: 'shop', permission: 'shop.manage-cutters' },
-    {
-      summary: 'Add a cutter to a shop’s list',
-      body: shop.createShopCutterBody,
-      answer: shop.shopCutter,
-      status: 201,
-    },
-  ),
-  changeShopCutter: endpoint(
-    'PUT',
-    '/api/shop/cutters/{cutterId}',
-    { kind: 'shop', permission: 'shop.manage-cutters' },
-    {
-      summary: 'Change a cutter of a shop’s list',
-      params: z.strictObject({ cutterId: recordId }),
-      body: shop.changeShopCutterBody,
-      answer: shop.shopCutter,
-    },
-  ),
-  deleteShopCutter: endpoint(
-    'DELETE',
-    '/api/shop/cutters/{cutterId}',
-    { kind: 'shop', permission: 'shop.manage-cutters' },
-    {
-      summary: 'Take a cutter off a shop’s list',
-      params: z.strictObject({ cutterId: recordId }),
-    },
-  ),
+  createShopCutter: endpoint('POST', '/api/shop/cutters', MANAGES_CUTTERS, {
+    summary: 'Add a cutter to a shop’s list',
+    body: shop.createShopCutterBody,
+    answer: shop.shopCutter,
+    status: 201,
+  }),
+  changeShopCutter: endpoint('PUT', '/api/shop/cutters/{cutterId}', MANAGES_CUTTERS, {
+    summary: 'Change a cutter of a shop’s list',
+    params: z.strictObject({ cutterId: recordId }),
+    body: shop.changeShopCutterBody,
+    answer: shop.shopCutter,
+  }),
+  deleteShopCutter: endpoint('DELETE', '/api/shop/cutters/{cutterId}', MANAGES_CUTTERS, {
+    summary: 'Take a cutter off a shop’s list',
+    params: z.strictObject({ cutterId: recordId }),
+  }),
 } as const;
 
 export type EndpointName = keyof typeof ENDPOINTS;
