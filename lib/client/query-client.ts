@@ -1,5 +1,5 @@
 import { QueryClient } from '@tanstack/react-query';
-import { ApiError } from './api-error';
+import { NoAnswerError, ApiError, UnexpectedAnswerError } from './api-error';
 
 /** Tries again what may come right by itself; an answer that says no is taken at its word. */
 export function createQueryClient(): QueryClient {
@@ -14,5 +14,6 @@ export function createQueryClient(): QueryClient {
 }
 
 function mayComeRight(error: Error): boolean {
-  return !(error instanceof ApiError) || error.status >= 500;
+  if (error instanceof ApiError || error instanceof UnexpectedAnswerError) return error.status >= 500;
+  return error instanceof NoAnswerError;
 }
