@@ -1,0 +1,7 @@
+import { SignUpForm } from '@/components/account/sign-up-form';
+
+export const metadata = { title: 'Make an account' };
+
+export default function SignUpPage() {
+  return <SignUpForm />;
+}
