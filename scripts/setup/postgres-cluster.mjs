@@ -17,7 +17,7 @@ import { firstFreePort } from './free-port.mjs';
 import { PlainError } from './plain-error.mjs';
 import { choosePostgres } from './postgres-programs.mjs';
 import { readPostmasterFile } from './postmaster-file.mjs';
-import { isAlive, processesWorkingIn, workingFolder } from './process-identity.mjs';
+import { processesWorkingIn, workingFolder } from './process-identity.mjs';
 import { keptSecret } from './secret.mjs';
 
 const USER = 'spindleaf';
@@ -139,9 +139,9 @@ async function endLeftovers(folder) {
     left = processesWorkingIn(folder, 'postgres');
   }
   // The kernel has just said that no PostgreSQL works in this folder (where it can tell: it knows where we work), so the
-  // number in the file belongs to a stranger, or to a dead server that nobody has buried yet.
-  const named = readPostmasterFile(folder)?.pid;
-  if (named !== undefined && isAlive(named) && workingFolder(process.pid) !== null) {
+  // number in the file belongs to a stranger, or to a dead server that nobody has buried yet. PostgreSQL would refuse for
+  // either.
+  if (readPostmasterFile(folder) !== null && workingFolder(process.pid) !== null) {
     rmSync(path.join(folder, 'postmaster.pid'), { force: true });
   }
 }

@@ -3,10 +3,13 @@ import { readFileSync, readdirSync, readlinkSync } from 'node:fs';
 
 /**
  * @param {number} pid
- * @returns {boolean} whether a process of this number exists, ours or not
+ * @returns {boolean} whether a process of this number runs, ours or not. One that has ended but is not yet buried by its
+ *   parent does not: the first process of a container may never come round to it.
  */
 export function isAlive(pid) {
   if (!Number.isSafeInteger(pid) || pid <= 0) return false;
+  const state = readStat(pid)?.state;
+  if (state === 'Z' || state === 'X') return false;
   try {
     process.kill(pid, 0);
     return true;
@@ -25,23 +28,32 @@ export function isAlive(pid) {
 export function birthMark(pid) {
   try {
     const boot = readFileSync('/proc/sys/kernel/random/boot_id', 'utf8').trim();
-    const start = startTicks(readFileSync(`/proc/${pid}/stat`, 'utf8'));
-    return start === null ? null : `${boot}/${start}`;
+    const start = readStat(pid)?.startTicks;
+    return start === undefined ? null : `${boot}/${start}`;
   } catch {
     return null;
   }
 }
 
 /**
- * Field 22 (starttime) of a /proc/PID/stat line, see proc(5). The second field is the program's name in parentheses and
- * may itself hold spaces and parentheses, so fields count from the last closing one.
+ * The fields of a /proc/PID/stat line that are wanted here: 3 (state) and 22 (starttime), see proc(5). The second field is
+ * the program's name in parentheses and may itself hold spaces and parentheses, so fields count from the last closing one.
  *
  * @param {string} line
- * @returns {string | null}
+ * @returns {{ state: string | undefined, startTicks: string | undefined }}
  */
-export function startTicks(line) {
-  const afterName = line.slice(line.lastIndexOf(')') + 2).split(' ');
-  return afterName[22 - 3] ?? null;
+export function parseStat(line) {
+  const fromThird = line.slice(line.lastIndexOf(')') + 2).split(' ');
+  return { state: fromThird[0], startTicks: fromThird[22 - 3] };
+}
+
+/** @param {number} pid */
+function readStat(pid) {
+  try {
+    return parseStat(readFileSync(`/proc/${pid}/stat`, 'utf8'));
+  } catch {
+    return null;
+  }
 }
 
 /**

@@ -37,17 +37,20 @@ export function createShutdown() {
 }
 
 /**
- * Stops everything and ends the process on Ctrl-C, on `kill`, and when the terminal goes.
+ * Stops everything and ends the process on Ctrl-C, on `kill`, when the terminal goes, and when the npm that started us has
+ * been killed: it can hand on a SIGTERM, but not a SIGKILL.
  *
  * @param {Shutdown} shutdown
  * @param {{ exitCode: number, say?: (text: string) => void }} options
  */
 export function stopOnSignals(shutdown, { exitCode, say = console.log }) {
-  for (const signal of /** @type {const} */ (['SIGINT', 'SIGTERM', 'SIGHUP'])) {
-    process.on(signal, () => {
-      if (shutdown.isStopping()) return;
-      say('\nStopping …');
-      void shutdown.stopAll().then(() => process.exit(exitCode));
-    });
-  }
+  const stop = () => {
+    if (shutdown.isStopping()) return;
+    say('\nStopping …');
+    void shutdown.stopAll().then(() => process.exit(exitCode));
+  };
+  for (const signal of /** @type {const} */ (['SIGINT', 'SIGTERM', 'SIGHUP'])) process.on(signal, stop);
+  if (process.env.npm_lifecycle_event === undefined) return;
+  const npm = process.ppid;
+  setInterval(() => process.ppid !== npm && stop(), 500).unref();
 }
