@@ -30,6 +30,9 @@ export interface RouteContext<E extends Endpoint> {
   readonly project: E['access']['kind'] extends 'project' ? ProjectAccess : null;
 }
 
+/** Endpoints without an answer may be handled by what returns nothing. */
+type Nothing<E extends Endpoint> = undefined extends AnswerOf<E> ? void : never;
+
 type NextContext = { readonly params: Promise<Record<string, string | string[] | undefined>> };
 
 /** A route handler that knows what it was declared as; a test asks every route file for it. */
@@ -45,7 +48,7 @@ export interface RouteHandler {
  */
 export function route<E extends Endpoint>(
   endpoint: E,
-  handle: (context: RouteContext<E>) => Promise<AnswerOf<E> | Response>,
+  handle: (context: RouteContext<E>) => Promise<AnswerOf<E> | Response | Nothing<E>>,
 ): RouteHandler {
   const handler = async (request: NextRequest, context: NextContext): Promise<Response> => {
     try {
