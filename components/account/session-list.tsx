@@ -1,5 +1,6 @@
 'use client';
 
+import { useRouter } from 'next/navigation';
 import { useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { ConfirmDialog } from '@/components/ui/dialog';
@@ -73,12 +74,14 @@ function SignOutEverywhere() {
   const [asking, setAsking] = useState(false);
   const everywhere = useSignOutEverywhere();
   const forget = useForgetAccount();
+  const router = useRouter();
   const toast = useToast();
   const signOut = () =>
     everywhere.mutate(undefined, {
       onSuccess: () => {
         forget();
-        window.location.assign('/sign-in?ended');
+        router.replace('/sign-in?ended');
+        router.refresh();
       },
       onError: (error) => toast({ kind: 'error', text: sentenceOf(error) }),
     });

@@ -1,0 +1,4 @@
+'use client';
+export function StartFromFile(_: { onMade: (project: never) => void }) {
+  return null;
+}
