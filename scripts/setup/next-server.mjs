@@ -20,7 +20,7 @@ const PATIENCE = 120_000;
 /** @typedef {{ address: string, ended: Promise<number>, stop: () => Promise<void> }} NextServer */
 
 /**
- * Serves the app on the first free port of loopback and waits until it answers.
+ * Serves the app on the first free port of loopback and waits until it says that it is ready, its database included.
  *
  * @param {string} root
  * @param {ServeRequest} request
@@ -66,36 +66,36 @@ async function tryPort(root, { mode, log, envFor, shutdown }, port) {
     child.once('exit', (code) => resolve(code ?? 128));
   });
 
-  if (await answersBefore(address, ended)) return { address, ended, stop };
+  if (await becomesReady(address, ended)) return { address, ended, stop };
   forget();
   await stop();
   const said = log ? readFileSync(log, 'utf8') : '';
   if (said.includes('EADDRINUSE')) return null;
-  throw new PlainError(`The app does not answer at ${address}.${said ? ` It said:\n${said.trim()}` : ''}`);
+  throw new PlainError(`The app does not get ready at ${address}.${said ? ` It said:\n${said.trim()}` : ''}`);
 }
 
 /**
  * @param {string} address
  * @param {Promise<number>} ended
- * @returns {Promise<boolean>} false when the server ended, or gave only errors until our patience was over
+ * @returns {Promise<boolean>} false when the server ended, or was not ready before our patience was over
  */
-async function answersBefore(address, ended) {
+async function becomesReady(address, ended) {
   let alive = true;
   void ended.then(() => (alive = false));
   const deadline = Date.now() + PATIENCE;
   while (alive && Date.now() < deadline) {
-    if (await answers(address)) return alive;
+    if (await isReady(address)) return alive;
     await Promise.race([wait(200), ended]);
   }
   return false;
 }
 
 /** @param {string} address */
-async function answers(address) {
+async function isReady(address) {
   try {
-    const response = await fetch(address, { redirect: 'manual', signal: AbortSignal.timeout(30_000) });
+    const response = await fetch(`${address}/api/readyz`, { signal: AbortSignal.timeout(30_000) });
     await response.body?.cancel();
-    return response.status < 500;
+    return response.ok;
   } catch {
     return false;
   }

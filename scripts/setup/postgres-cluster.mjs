@@ -38,7 +38,6 @@ const STOP_PATIENCE = 20_000;
  * @property {string} purposeFolder where the log lies, and the data too when the server's user can reach it
  * @property {readonly import('./postgres-programs.mjs').PostgresPrograms[]} installed newest first
  * @property {number} firstPort
- * @property {boolean} lasting whether the data must survive a power cut; test data need not
  * @property {import('./shutdown.mjs').Shutdown} shutdown
  */
 
@@ -49,14 +48,14 @@ const STOP_PATIENCE = 20_000;
  * @param {ClusterRequest} request
  * @returns {Promise<Cluster>}
  */
-export async function startCluster({ purposeFolder, installed, firstPort, lasting, shutdown }) {
+export async function startCluster({ purposeFolder, installed, firstPort, shutdown }) {
   const place = clusterPlace(purposeFolder);
   const programs = choosePostgres(installed, clusterMajor(place.folder), place.folder);
-  if (clusterMajor(place.folder) === null) await makeCluster(place, programs, { lasting, shutdown });
+  if (clusterMajor(place.folder) === null) await makeCluster(place, programs, shutdown);
   const password = keptSecret(passwordFile(place.folder));
   await endLeftovers(place.folder);
   const log = path.join(purposeFolder, 'postgres.log');
-  const { child, port, ended } = await startServer(place, programs, { log, firstPort, lasting, shutdown });
+  const { child, port, ended } = await startServer(place, programs, { log, firstPort, shutdown });
   // SIGINT is PostgreSQL's "fast shutdown": roll back, write out, go.
   shutdown.onStop(() => stopChild(child, 'SIGINT', STOP_PATIENCE));
 
@@ -89,9 +88,9 @@ export function clusterMajor(folder) {
  *
  * @param {import('./cluster-place.mjs').ClusterPlace} place
  * @param {import('./postgres-programs.mjs').PostgresPrograms} programs
- * @param {{ lasting: boolean, shutdown: import('./shutdown.mjs').Shutdown }} options
+ * @param {import('./shutdown.mjs').Shutdown} shutdown
  */
-async function makeCluster({ folder, runAs }, { bin }, { lasting, shutdown }) {
+async function makeCluster({ folder, runAs }, { bin }, shutdown) {
   console.log('Making the database …');
   // Nothing of ours leaves a folder without PG_VERSION here, so whatever it is, it is kept.
   if (existsSync(folder)) renameSync(folder, `${folder}.broken-${Date.now()}`);
@@ -102,7 +101,7 @@ async function makeCluster({ folder, runAs }, { bin }, { lasting, shutdown }) {
   if (runAs) for (const owned of [draft, passwordFile(folder)]) chownSync(owned, runAs.uid, runAs.gid);
 
   const args = ['-D', draft, '-U', USER, '--auth=scram-sha-256', `--pwfile=${passwordFile(folder)}`];
-  args.push('--locale=C.UTF-8', '--encoding=UTF8', ...(lasting ? [] : ['--no-sync']));
+  args.push('--locale=C.UTF-8', '--encoding=UTF8');
   await mustRun('initdb', path.join(bin, 'initdb'), args, {
     cwd: '/',
     as: runAs,
@@ -165,7 +164,7 @@ function signal(pid, name) {
 /**
  * @param {import('./cluster-place.mjs').ClusterPlace} place
  * @param {import('./postgres-programs.mjs').PostgresPrograms} programs
- * @param {{ log: string, firstPort: number, lasting: boolean, shutdown: import('./shutdown.mjs').Shutdown }} options
+ * @param {{ log: string, firstPort: number, shutdown: import('./shutdown.mjs').Shutdown }} options
  * @returns {Promise<RunningServer>}
  */
 async function startServer(place, programs, options) {
@@ -183,14 +182,13 @@ async function startServer(place, programs, options) {
 /**
  * @param {import('./cluster-place.mjs').ClusterPlace} place
  * @param {import('./postgres-programs.mjs').PostgresPrograms} programs
- * @param {{ log: string, port: number, lasting: boolean, shutdown: import('./shutdown.mjs').Shutdown }} options
+ * @param {{ log: string, port: number, shutdown: import('./shutdown.mjs').Shutdown }} options
  * @returns {Promise<RunningServer | null>} null when the port was taken
  */
-async function tryPort({ folder, runAs }, { bin }, { log, port, lasting, shutdown }) {
+async function tryPort({ folder, runAs }, { bin }, { log, port, shutdown }) {
   rmSync(log, { force: true });
   const logFile = openSync(log, 'w');
   const settings = ['listen_addresses=127.0.0.1', 'unix_socket_directories=', 'logging_collector=off'];
-  if (!lasting) settings.push('fsync=off', 'synchronous_commit=off', 'full_page_writes=off');
   const child = spawnTied(
     path.join(bin, 'postgres'),
     ['-D', folder, '-p', String(port), ...settings.flatMap((setting) => ['-c', setting])],

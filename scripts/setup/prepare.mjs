@@ -14,10 +14,9 @@ const FIRST_DATABASE_PORT = 54_310;
  * @param {object} request
  * @param {string} request.purposeFolder
  * @param {readonly string[]} request.databases
- * @param {boolean} request.lasting
  * @param {import('./shutdown.mjs').Shutdown} request.shutdown
  */
-export async function startDatabase({ purposeFolder, databases, lasting, shutdown }) {
+export async function startDatabase({ purposeFolder, databases, shutdown }) {
   const find = () => {
     const found = installedPostgres();
     return found.length > 0 ? found : null;
@@ -30,7 +29,6 @@ export async function startDatabase({ purposeFolder, databases, lasting, shutdow
     purposeFolder,
     installed,
     firstPort: FIRST_DATABASE_PORT,
-    lasting,
     shutdown,
   });
   for (const name of databases) await cluster.ensureDatabase(name);

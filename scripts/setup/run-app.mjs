@@ -24,7 +24,7 @@ export async function runApp(mode, shutdown) {
 
   // The second one is for developers who run single tests against a database by hand; `npm test` has its own cluster.
   const databases = ['spindleaf', 'spindleaf_test'];
-  const database = await startDatabase({ purposeFolder: folder, databases, lasting: true, shutdown });
+  const database = await startDatabase({ purposeFolder: folder, databases, shutdown });
   const known = {
     databaseUrl: database.url('spindleaf'),
     secret: keptSecret(path.join(folder, 'sign-in-secret')),

@@ -59,7 +59,7 @@ export function databaseOnce() {
   /** @type {ReturnType<typeof startDatabase> | undefined} */
   let started;
   return ({ folder, shutdown }) =>
-    (started ??= startDatabase({ purposeFolder: folder, databases: [], lasting: false, shutdown }));
+    (started ??= startDatabase({ purposeFolder: folder, databases: [], shutdown }));
 }
 
 /** @type {Stage} */
