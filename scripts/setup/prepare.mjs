@@ -38,17 +38,30 @@ export async function startDatabase({ purposeFolder, databases, shutdown }) {
 /**
  * What the app needs to know of its surroundings.
  *
- * @param {{ databaseUrl: string, secret: string, address?: string }} known
+ * @typedef {object} Known
+ * @property {string} databaseUrl
+ * @property {string} secret signs session cookies
+ * @property {{ email: string, password: string } | null} [demo] the account that the landing page offers
+ * @property {string} [address]
+ */
+/**
+ * @param {Known} known
  * @returns {NodeJS.ProcessEnv}
  */
-export function appEnvironment({ databaseUrl, secret, address }) {
+export function appEnvironment({ databaseUrl, secret, demo, address }) {
   return {
     ...process.env,
     DATABASE_URL: databaseUrl,
     NEXTAUTH_SECRET: secret,
+    ...(demo ? demoEnvironment(demo) : {}),
     ...(address ? { NEXTAUTH_URL: address } : {}),
     NEXT_TELEMETRY_DISABLED: '1',
   };
+}
+
+/** @param {{ email: string, password: string }} demo */
+export function demoEnvironment({ email, password }) {
+  return { SPINDLEAF_DEMO_EMAIL: email, SPINDLEAF_DEMO_PASSWORD: password };
 }
 
 /**

@@ -1,5 +1,6 @@
 // @ts-check
 import path from 'node:path';
+import { demoSignIn } from './demo-sign-in.mjs';
 import { ensurePackages } from './npm-packages.mjs';
 import { ensureBuild, lockFile } from './next-build.mjs';
 import { serveNext } from './next-server.mjs';
@@ -25,13 +26,13 @@ export async function runApp(mode, shutdown) {
   // The second one is for developers who run single tests against a database by hand; `npm test` has its own cluster.
   const databases = ['spindleaf', 'spindleaf_test'];
   const database = await startDatabase({ purposeFolder: folder, databases, shutdown });
-  const known = {
+  const settings = {
     databaseUrl: database.url('spindleaf'),
     secret: keptSecret(path.join(folder, 'sign-in-secret')),
   };
+  const seeded = await migrateAndSeed(appEnvironment(settings), shutdown);
+  const known = { ...settings, demo: demoSignIn(seeded) };
   const env = appEnvironment(known);
-  await runScript(projectRoot, 'migrate', { env, shutdown });
-  const demo = await runScript(projectRoot, 'seed', { env, shutdown });
   if (mode === 'start') await ensureBuild(projectRoot, { env, purpose: 'app', shutdown });
 
   const server = await serveNext(projectRoot, {
@@ -42,13 +43,23 @@ export async function runApp(mode, shutdown) {
     shutdown,
   });
   announce(lockFile('app'), server.address);
-  console.log(`\nSpindleaf is running at ${server.address}\n${demo.trimEnd()}\nStop it with Ctrl-C.`);
+  console.log(`\nSpindleaf is running at ${server.address}\n${seeded.trimEnd()}\nStop it with Ctrl-C.`);
 
   const what = await Promise.race([
     server.ended.then(() => 'The app'),
     database.ended.then(() => 'PostgreSQL'),
   ]);
   if (!shutdown.isStopping()) throw new PlainError(`${what} has ended by itself; see the logs in ${folder}.`);
+}
+
+/**
+ * @param {NodeJS.ProcessEnv} env
+ * @param {import('./shutdown.mjs').Shutdown} shutdown
+ * @returns {Promise<string>} what the seed says of the demo's accounts
+ */
+async function migrateAndSeed(env, shutdown) {
+  await runScript(projectRoot, 'migrate', { env, shutdown });
+  return runScript(projectRoot, 'seed', { env, shutdown });
 }
 
 /**

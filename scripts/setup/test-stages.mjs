@@ -2,11 +2,12 @@
 import { rmSync } from 'node:fs';
 import path from 'node:path';
 import { randomBytes } from 'node:crypto';
+import { demoSignIn } from './demo-sign-in.mjs';
 import { mustRun, runToEnd } from './child-process.mjs';
 import { ensureBuild, nextProgram } from './next-build.mjs';
 import { serveNext } from './next-server.mjs';
 import { PlainError } from './plain-error.mjs';
-import { appEnvironment, runScript, startDatabase } from './prepare.mjs';
+import { appEnvironment, demoEnvironment, runScript, startDatabase } from './prepare.mjs';
 import { ensureSystemProgram, findChromium } from './system-packages.mjs';
 import { countOne, countPlaywright, countVitest, readReport } from './test-counts.mjs';
 
@@ -87,8 +88,9 @@ async function runBrowser(run) {
     { name: 'Chromium', find: findChromium, debianPackage: 'chromium' },
     shutdown,
   );
-  const env = await freshDatabase(run, 'spindleaf_browser_test');
-  await runScript(root, 'seed', { env, shutdown });
+  const bare = await freshDatabase(run, 'spindleaf_browser_test');
+  const demo = demoSignIn(await runScript(root, 'seed', { env: bare, shutdown }));
+  const env = demo ? { ...bare, ...demoEnvironment(demo) } : bare;
   await ensureBuild(root, { env, purpose: 'test', shutdown });
   const server = await serveNext(root, {
     mode: 'start',
