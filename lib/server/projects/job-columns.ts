@@ -1,4 +1,3 @@
-import 'server-only';
 import { jobHash } from '@/lib/job/canonical';
 import type { Job } from '@/lib/job/job-schema';
 
