@@ -1,4 +1,4 @@
-import type { Polyline } from './contour';
+import type { Polyline, Ring } from './contour';
 import { pointsBox } from './measure';
 import type { Vec } from './vec';
 
@@ -17,16 +17,14 @@ export interface DistanceQuery {
   nearest(p: Vec): NearestPlace | null;
 }
 
-/** The closed rings of a region as lines to ask about. */
-export function ringLines(region: readonly (readonly Vec[])[]): Polyline[] {
-  return region.map((points) => ({ points, closed: true }));
-}
-
 /**
- * Answers exact distances to polylines (a point alone is a line without length). Edges lie in a square grid of about
+ * Answers exact distances to polylines and rings (a point alone is a line without length). Edges lie in a square grid of about
  * one edge a cell; a query looks at rings of cells outwards until none can be nearer.
  */
-export function createDistanceQuery(lines: readonly Polyline[]): DistanceQuery {
+export function createDistanceQuery(shapes: readonly (Polyline | Ring)[]): DistanceQuery {
+  const lines = shapes.map((shape): Polyline =>
+    'points' in shape ? shape : { points: shape, closed: true },
+  );
   const edges = collectEdges(lines);
   if (edges.count === 0) return { distance: () => Number.POSITIVE_INFINITY, nearest: () => null };
   const grid = createGrid(edges, lines);
