@@ -17,6 +17,11 @@ export interface DistanceQuery {
   nearest(p: Vec): NearestPlace | null;
 }
 
+/** The closed rings of a region as lines to ask about. */
+export function ringLines(region: readonly Ring[]): Polyline[] {
+  return region.map((points) => ({ points, closed: true }));
+}
+
 /**
  * Answers exact distances to polylines and rings (a point alone is a line without length). Edges lie in a square grid of about
  * one edge a cell; a query looks at rings of cells outwards until none can be nearer.
