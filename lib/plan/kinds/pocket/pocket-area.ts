@@ -1,0 +1,21 @@
+import { evenOddRegions } from '@/lib/geometry/boolean';
+import type { Region } from '@/lib/geometry/contour';
+import { insetRegion } from '../../shared/inset-region';
+import { regionPieces } from '@/lib/geometry/pieces';
+import type { CutOf } from '@/lib/job/cut-schema';
+import { cutterOf } from '@/lib/job/cut-values';
+import type { Job } from '@/lib/job/job-schema';
+import type { ResolvedOutlines } from '@/lib/outline/resolve-outlines';
+import { runOutRegion } from '../../shared/run-out';
+
+/** What a pocket asks for, in its face's view: its outlines combined even-odd, carried out over the board's edges. */
+export function pocketArea(job: Job, cut: CutOf<'pocket'>, resolved: ResolvedOutlines): Region {
+  const combined = evenOddRegions(cut.outlines.map((id) => resolved.get(id, cut.face).region));
+  if (!cut.runOut) return combined;
+  return runOutRegion(combined, job.board, cutterOf(job, cut).diameter / 2 + 1);
+}
+
+/** Pieces of an area into which a disc of that radius does not go at all. */
+export function unreachablePieces(area: Region, radius: number): Region[] {
+  return regionPieces(area).filter((piece) => insetRegion(piece, radius).length === 0);
+}

@@ -1,0 +1,96 @@
+import type { Descent } from './entry';
+import { rampLength } from './entry';
+import { followRuns, liftOverTabs, liftReach, type HeightRun, type TabLift } from './height-run';
+import type { MoveWriter } from './move-writer';
+import { pointAt, reverseTrack, type Track } from './track';
+
+/** A track cut in layers. Depths are mm below the face, growing. */
+export interface Laps {
+  readonly track: Track;
+  /** Where the wood begins. */
+  readonly top: number;
+  readonly layers: readonly number[];
+  readonly descent: Descent;
+  readonly tabs: readonly TabLift[];
+}
+
+/**
+ * Cuts a track layer by layer, from where `at` (a length along a closed track) lies. On a closed track the ramp of a
+ * layer goes on from the lap before, and a whole level lap follows it, so no slope is left behind. An open track is
+ * always run from its start: the ramp goes to and fro there, then the level pass runs as drawn.
+ */
+export function cutLaps(writer: MoveWriter, laps: Laps, at = 0): void {
+  if (laps.track.closed) cutClosed(writer, laps, clearOfTabs(laps, at));
+  else cutOpen(writer, laps);
+}
+
+function cutClosed(writer: MoveWriter, { track, top, layers, descent, tabs }: Laps, start: number): void {
+  writer.travelTo(pointAt(track, start));
+  writer.descendTo(-top);
+  let s = start;
+  let z = -top;
+  for (const depth of layers) {
+    const ramp = descent.angle === null ? 0 : rampLength(z + depth, descent.angle);
+    if (ramp > 0) run(writer, track, { from: s, to: s + ramp, zFrom: z, zTo: -depth }, tabs);
+    s += ramp;
+    run(writer, track, { from: s, to: s + track.length, zFrom: -depth, zTo: -depth }, tabs);
+    s -= Math.floor(s / track.length) * track.length;
+    z = -depth;
+  }
+}
+
+function cutOpen(writer: MoveWriter, { track, top, layers, descent, tabs }: Laps): void {
+  let z = -top;
+  for (const depth of layers) {
+    writer.travelTo(track.start);
+    writer.descendTo(z);
+    if (descent.angle !== null) zigzag(writer, { track, tabs }, z, -depth, descent.angle);
+    run(writer, track, { from: 0, to: track.length, zFrom: -depth, zTo: -depth }, tabs);
+    z = -depth;
+  }
+}
+
+/** Down at the start of an open track, to and fro in an even number of legs (real angle ≤ the one asked for). */
+function zigzag(
+  writer: MoveWriter,
+  { track, tabs }: Pick<Laps, 'track' | 'tabs'>,
+  from: number,
+  to: number,
+  angle: number,
+): void {
+  const whole = rampLength(from - to, angle);
+  if (whole === 0) return;
+  const pairs = Math.max(1, Math.ceil(whole / (2 * track.length)));
+  const leg = whole / (2 * pairs);
+  const back = reverseTrack(track);
+  const turn = track.length - leg;
+  const tabsBack = tabs.map((tab) => ({ ...tab, at: track.length - tab.at }));
+  for (let i = 0; i < pairs; i++) {
+    const high = from + ((to - from) * i) / pairs;
+    const low = from + ((to - from) * (i + 1)) / pairs;
+    const middle = (high + low) / 2;
+    run(writer, track, { from: 0, to: leg, zFrom: high, zTo: middle }, tabs);
+    run(writer, back, { from: turn, to: track.length, zFrom: middle, zTo: low }, tabsBack);
+  }
+}
+
+function run(writer: MoveWriter, track: Track, level: HeightRun, tabs: readonly TabLift[]): void {
+  followRuns(writer, track, liftOverTabs(level, tabs, track.closed ? track.length : Infinity));
+}
+
+/** A start that is not over a tab, so that the first descent is into the kerf. */
+function clearOfTabs({ track, tabs, layers }: Laps, at: number): number {
+  const floor = -(layers.at(-1) ?? 0);
+  let place = at;
+  for (let tries = 0; tries <= tabs.length; tries++) {
+    const hit = tabs.find((tab) => awayFrom(tab, place, track.length) < liftReach(tab, floor));
+    if (!hit) return place;
+    place = hit.at + liftReach(hit, floor) + 0.1;
+  }
+  return at;
+}
+
+function awayFrom(tab: TabLift, at: number, lap: number): number {
+  const d = Math.abs(at - tab.at) % lap;
+  return Math.min(d, lap - d);
+}
