@@ -1,5 +1,5 @@
 import 'server-only';
-import type { EntityManager } from '@mikro-orm/postgresql';
+import { type EntityManager, raw } from '@mikro-orm/postgresql';
 import { endpointHref } from '@/lib/contracts/endpoint';
 import { ENDPOINTS } from '@/lib/contracts/endpoints';
 import type { Person } from '@/lib/contracts/moment';
@@ -58,7 +58,7 @@ export async function openCommentCounts(
 ): Promise<ReadonlyMap<string, number>> {
   const rows = await em
     .createQueryBuilder(Comment, 'c')
-    .select(['c.project', 'count(*)::int as open'])
+    .select(['c.project', raw('count(*)::int as open')])
     .where({ project: { $in: [...projectIds] }, thread: null, resolvedAt: null, deletedAt: null })
     .groupBy('c.project')
     .execute<{ project: string; open: number }[]>('all');
