@@ -102,6 +102,13 @@ function checkMachine({ machine }: Job): Problem[] {
       message: `must not be above spindle.max (${machine.spindle.max}).`,
     });
   }
+  const { dialect, toolChange } = machine.controller;
+  if (dialect === 'grbl' && toolChange === 'm6') {
+    problems.push({
+      path: 'machine.controller.toolChange',
+      message: "grbl has no M6; use 'split' or 'pause'.",
+    });
+  }
   if (machine.approach > machine.clearance) {
     problems.push({
       path: 'machine.approach',
