@@ -108,5 +108,7 @@ export async function call(
     ...(body !== undefined && { body: typeof body === 'string' ? body : JSON.stringify(body) }),
   });
   const texts = Object.entries(params).map(([key, value]) => [key, String(value)]);
-  return handler(request, { params: Promise.resolve(Object.fromEntries(texts)) });
+  // As Next does it: no parameters at all where the address has none.
+  const given = texts.length > 0 ? Object.fromEntries(texts) : undefined;
+  return handler(request, { params: Promise.resolve(given) });
 }

@@ -33,7 +33,8 @@ export interface RouteContext<E extends Endpoint> {
 /** Endpoints without an answer may be handled by what returns nothing. */
 type Nothing<E extends Endpoint> = undefined extends AnswerOf<E> ? void : never;
 
-type NextContext = { readonly params: Promise<Record<string, string | string[] | undefined>> };
+/** Next gives no parameters at all where the address has none. */
+type NextContext = { readonly params: Promise<Record<string, string | string[] | undefined> | undefined> };
 
 /** A route handler that knows what it was declared as; a test asks every route file for it. */
 export interface RouteHandler {
@@ -52,7 +53,7 @@ export function route<E extends Endpoint>(
 ): RouteHandler {
   const handler = async (request: NextRequest, context: NextContext): Promise<Response> => {
     try {
-      const answer = await handle(await admit(endpoint, request, await context.params));
+      const answer = await handle(await admit(endpoint, request, (await context.params) ?? {}));
       return answer instanceof Response ? answer : answerResponse(endpoint, answer);
     } catch (error) {
       return problemResponse(asApiError(error, endpoint, request));
