@@ -1,9 +1,9 @@
 // @ts-check
+import { randomBytes } from 'node:crypto';
 import { rmSync } from 'node:fs';
 import path from 'node:path';
-import { randomBytes } from 'node:crypto';
-import { demoSignIn } from './demo-sign-in.mjs';
 import { mustRun, runToEnd } from './child-process.mjs';
+import { demoSignIn } from './demo-sign-in.mjs';
 import { ensureBuild, nextProgram } from './next-build.mjs';
 import { serveNext } from './next-server.mjs';
 import { PlainError } from './plain-error.mjs';
@@ -55,7 +55,12 @@ export function chosenStages(args) {
   return all.filter((name) => wanted.includes(name));
 }
 
-/** @returns {(request: { folder: string, shutdown: import('./shutdown.mjs').Shutdown }) => Promise<import('./postgres-cluster.mjs').Cluster>} */
+/**
+ * A cluster is started when the first stage wants it, and serves the later ones too.
+ *
+ * @returns {(request: { folder: string, shutdown: import('./shutdown.mjs').Shutdown }) =>
+ *   Promise<import('./postgres-cluster.mjs').Cluster>}
+ */
 export function databaseOnce() {
   /** @type {ReturnType<typeof startDatabase> | undefined} */
   let started;
@@ -78,7 +83,8 @@ async function checkTypes(run) {
 /** @type {Stage} */
 async function runIntegration(run) {
   const env = await freshDatabase(run, 'spindleaf_test');
-  return runVitest(run, 'integration', [INTEGRATION_FOLDER], env);
+  // Both names, lest one set by the developer lead the tests elsewhere.
+  return runVitest(run, 'integration', [INTEGRATION_FOLDER], { ...env, TEST_DATABASE_URL: env.DATABASE_URL });
 }
 
 /** @type {Stage} */
