@@ -1,11 +1,12 @@
 'use client';
 
+import Link from 'next/link';
 import { useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { Skeleton } from '@/components/ui/skeleton';
-import { EmptyState, ErrorState } from '@/components/ui/states';
+import { EmptyState, ErrorState, NoPermissionState } from '@/components/ui/states';
 import { useToast } from '@/components/ui/toast';
-import { sentenceOf } from '@/lib/client/api-error';
+import { ApiError, sentenceOf } from '@/lib/client/api-error';
 import { useDeleteProjects } from '@/lib/client/use-delete-projects';
 import { useProjects } from '@/lib/client/use-projects';
 import type { ProjectItem } from '@/lib/contracts/project';
@@ -61,9 +62,7 @@ export function ProjectsPage() {
       </p>
       {list.isPending ? <CardSkeletons /> : null}
       {list.isError && !list.data ? (
-        <ErrorState title="The projects could not be read" onRetry={() => void list.refetch()}>
-          {sentenceOf(list.error)}
-        </ErrorState>
+        <CannotRead error={list.error} onRetry={() => void list.refetch()} />
       ) : null}
       {list.isSuccess && shown.length === 0 ? (
         filtered ? (
@@ -93,6 +92,28 @@ export function ProjectsPage() {
       ) : null}
       <NewProjectDialog way={making} onWayChange={setMaking} />
     </main>
+  );
+}
+
+function CannotRead({ error, onRetry }: { error: Error; onRetry: () => void }) {
+  if (error instanceof ApiError && error.code === 'not-signed-in') {
+    return (
+      <NoPermissionState
+        title="You are signed out"
+        actions={
+          <Button variant="primary" asChild>
+            <Link href="/sign-in?callbackUrl=/projects">Sign in</Link>
+          </Button>
+        }
+      >
+        <p>Your session has ended. Sign in again to see your projects.</p>
+      </NoPermissionState>
+    );
+  }
+  return (
+    <ErrorState title="The projects could not be read" onRetry={onRetry}>
+      {sentenceOf(error)}
+    </ErrorState>
   );
 }
 

@@ -9,7 +9,11 @@ import { useTheme } from '@/components/ui/theme';
 import { useForgetAccount, useMe } from '@/lib/client/use-me';
 
 /** Who is signed in, and what belongs to this person and this device; for nobody, the way to sign in. */
-export function AccountMenu() {
+export function AccountMenu({ signedIn }: { signedIn: boolean }) {
+  return signedIn ? <SignedIn /> : <SignedOut />;
+}
+
+function SignedIn() {
   const { data: me, isPending } = useMe();
   if (isPending) return <span className="w-9" aria-hidden />;
   if (!me) return <SignedOut />;

@@ -42,18 +42,18 @@ export function AppHeader() {
             </nav>
           </>
         }
-        end={<AccountMenu />}
+        end={<AccountMenu signedIn />}
       />
     </>
   );
 }
 
-/** The header of the public pages. */
-export function SiteHeader() {
+/** The header of the public pages. `signedIn` is what the server found in the request. */
+export function SiteHeader({ signedIn }: { signedIn: boolean }) {
   return (
     <>
       <SkipLink />
-      <HeaderBar start={<HomeLink href="/" />} end={<AccountMenu />} />
+      <HeaderBar start={<HomeLink href="/" />} end={<AccountMenu signedIn={signedIn} />} />
     </>
   );
 }

@@ -74,7 +74,7 @@ export function Field({ label, hint, error, layout = 'stack', hideLabel, classNa
 /** The looks of everything that is typed into. */
 export const controlClass =
   'min-h-control w-full rounded border border-edge bg-well px-3 text-base text-ink placeholder:text-graphite ' +
-  'touch:min-h-touch aria-invalid:border-error aria-invalid:border-2 disabled:opacity-55 read-only:border-rule';
+  'touch:min-h-touch aria-invalid:border-error aria-invalid:border-2 disabled:opacity-55 [&[readonly]]:border-rule';
 
 type Shared = Omit<FieldProps, 'children'>;
 
