@@ -1,4 +1,6 @@
+import { SIZE_TOLERANCE } from '@/lib/base/tolerances';
 import type { Cut } from '@/lib/job/cut-schema';
+import { cutFloor } from '@/lib/job/cut-values';
 import type { Job } from '@/lib/job/job-schema';
 import type { ResolvedOutlines } from '@/lib/outline/resolve-outlines';
 import type { Problem } from '@/lib/report/problem';
@@ -7,7 +9,9 @@ import { circlesOf } from './shared/outline-circles';
 /** What planning cannot do with a document that is otherwise right, by place: it is refused, never left out silently. */
 export function refuseCuts(job: Job, outlines: ResolvedOutlines): Problem[] {
   return job.cuts.flatMap((cut, index) =>
-    cut.enabled ? [...refuseOptions(cut, index), ...refuseBores(cut, index, outlines)] : [],
+    cut.enabled
+      ? [...refuseOptions(cut, index), ...refuseBores(cut, index, outlines), ...refuseRest(job, cut, index)]
+      : [],
   );
 }
 
@@ -19,7 +23,6 @@ function refuseOptions(cut: Cut, index: number): Problem[] {
   if (cut.kind === 'pocket') {
     return [
       ...(cut.pattern === 'raster' ? [refuse('pattern', 'a raster pocket')] : []),
-      ...(cut.rest !== null ? [refuse('rest', 'a rest cut')] : []),
       ...(cut.relief !== 'none' ? [refuse('relief', 'corner relief')] : []),
     ];
   }
@@ -45,4 +48,13 @@ function refuseBores(cut: Cut, index: number, outlines: ResolvedOutlines): Probl
       },
     ];
   });
+}
+
+/** Below the earlier pocket's floor there are no leavings: all of the wood stands. */
+function refuseRest(job: Job, cut: Cut, index: number): Problem[] {
+  if (cut.kind !== 'pocket' || cut.rest === null) return [];
+  const earlier = job.cuts.find(({ id }) => id === cut.rest);
+  if (!earlier?.enabled || cutFloor(job, cut) <= cutFloor(job, earlier) + SIZE_TOLERANCE) return [];
+  const message = `'${earlier.name || earlier.id}' is less deep than this cut, so more than its leavings would be left.`;
+  return [{ path: `cuts[${index}].rest`, message }];
 }

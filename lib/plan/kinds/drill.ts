@@ -1,3 +1,4 @@
+import { regionCentroid } from '@/lib/geometry/measure';
 import { regionPieces } from '@/lib/geometry/pieces';
 import { orderTour } from '@/lib/geometry/tour';
 import type { Vec } from '@/lib/geometry/vec';
@@ -6,7 +7,6 @@ import type { ResolvedOutline } from '@/lib/outline/resolve-outlines';
 import { planOf, startPlace, type CutPlan, type CutWork } from '../shared/cut-work';
 import { createMoveWriter, type MoveWriter } from '../shared/move-writer';
 import { plungeFindings } from '../shared/entry';
-import { regionCentroid } from '../shared/region-centroid';
 
 /** Drills at points and at the centres of closed outlines, with pecks and a dwell where they are asked for. */
 export function planDrill(work: CutWork<'drill'>): CutPlan {

@@ -1,8 +1,8 @@
 import type { Contour } from '@/lib/geometry/contour';
 import { flattenContour } from '@/lib/geometry/flatten';
+import { regionCentroid } from '@/lib/geometry/measure';
 import { distance, type Vec } from '@/lib/geometry/vec';
 import type { ResolvedOutline } from '@/lib/outline/resolve-outlines';
-import { regionCentroid } from './region-centroid';
 
 /** A drawn curve may stray this far from a true circle and still be meant as one, mm (circles drawn as four cubics do). */
 const ROUNDNESS = 0.03;

@@ -6,13 +6,14 @@ import { orderTour } from '@/lib/geometry/tour';
 import { cutFloor } from '@/lib/job/cut-values';
 import type { Finding } from '@/lib/report/report';
 import { cutFinding, cutName, planOf, startPlace, type CutPlan, type CutWork } from '../../shared/cut-work';
-import { descentAlong } from '../../shared/entry';
 import { followRuns } from '../../shared/height-run';
 import { layerDepths } from '../../shared/layers';
 import { createLinkTest, type LinkTest } from '../../shared/links';
 import { createMoveWriter, type MoveWriter } from '../../shared/move-writer';
 import { tracksOfRegion } from '../../shared/outline-tracks';
 import { reverseTrack, type Track } from '../../shared/track';
+import { comeDown, enterPass, linkTo } from './clear-ground';
+import { cutRest } from './cut-rest';
 import { chooseEntry, entryFindings, entryPlace, goDown } from './enter-ground';
 import { insetPieces } from './inset-rings';
 import { passesInsideOut } from './pass-order';
@@ -39,9 +40,23 @@ export function planPocket(work: PocketWork): CutPlan {
   const findings = [...doesNotFit(work, area, radius + cut.allowance)];
   const depths = layerDepths(cut.start, cutFloor(job, cut), work.stepdown);
   const ground = insetRegion(area, radius + cut.allowance);
-  const pieces = groundPasses(work, ground, depths[0]! - cut.start);
-
   const writer = createMoveWriter(work.limits);
+  if (cut.rest === null) findings.push(...clearGround(writer, work, ground, depths));
+  else cutRest(writer, work, area, ground, depths);
+  if (cut.finish && cut.allowance > 0) {
+    finishWalls(writer, work, insetRegion(area, radius), depths.at(-1)!);
+  }
+  return planOf(work, writer.finish(), findings);
+}
+
+function clearGround(
+  writer: MoveWriter,
+  work: PocketWork,
+  ground: Region,
+  depths: readonly number[],
+): Finding[] {
+  const pieces = groundPasses(work, ground, depths[0]! - work.cut.start);
+  const findings: Finding[] = [];
   const tour = orderTour(
     pieces.map(({ entry }) => ({ entry: entryPlace(entry), exit: entryPlace(entry) })),
     startPlace(work),
@@ -51,8 +66,7 @@ export function planPocket(work: PocketWork): CutPlan {
     findings.push(...entryFindings(work, piece.entry));
     clearPiece(writer, work, piece, depths);
   }
-  if (cut.finish && cut.allowance > 0) finishWalls(writer, work, insetRegion(area, radius), depths.at(-1)!);
-  return planOf(work, writer.finish(), findings);
+  return findings;
 }
 
 function groundPasses(work: PocketWork, ground: Region, firstLayer: number): GroundPasses[] {
@@ -87,34 +101,6 @@ function clearPiece(
     });
     above = z;
   });
-}
-
-/** To a pass: straight where that stays within the ground, else over the board and down a ramp along the pass itself. */
-function enterPass(
-  writer: MoveWriter,
-  work: PocketWork,
-  pass: Track,
-  mayLink: LinkTest,
-  above: number,
-  z: number,
-): number {
-  if (linkTo(writer, pass.start, mayLink)) return 0;
-  comeDown(writer, pass.start, above);
-  const descent = descentAlong(work, work.cut.entry, pass.length);
-  return goDown(writer, { kind: 'along', track: pass, descent }, above, z, false);
-}
-
-/** Straight to a place at the present depth, where the way stays within the ground. */
-function linkTo(writer: MoveWriter, to: Track['start'], mayLink: LinkTest): boolean {
-  const at = writer.position();
-  if (!at || !mayLink(at, to)) return false;
-  writer.feedTo(to, at.z);
-  return true;
-}
-
-function comeDown(writer: MoveWriter, to: Track['start'], z: number): void {
-  writer.travelTo(to);
-  writer.descendTo(z);
 }
 
 /** A last pass along the walls themselves at full depth. */

@@ -1,0 +1,81 @@
+import { checkCancelled, type WorkControl } from '@/lib/base/cancel';
+import { differenceRegions, unionRegions } from '@/lib/geometry/boolean';
+import type { Polyline, Region, Ring } from '@/lib/geometry/contour';
+import { createDistanceQuery } from '@/lib/geometry/distance-query';
+import { regionContains } from '@/lib/geometry/measure';
+import { strokePolyline } from '@/lib/geometry/offset';
+import { regionPieces } from '@/lib/geometry/pieces';
+import { distance, lerp, type Vec } from '@/lib/geometry/vec';
+import { insetRegion } from '../../shared/inset-region';
+import { trackOfPoints, type Track } from '../../shared/track';
+import { withoutSlivers } from './leavings';
+
+/** Distance of the places at which a pass is tested, mm. */
+const TEST_STEP = 0.1;
+
+/** Discs are taken this much smaller when what is left is worked out, mm. */
+const COVER_SLACK = 0.01;
+
+/**
+ * Passes over leavings, piece by piece, each piece from its innermost pass to the wall: the stretches of `ground`'s
+ * boundary and its insets on which a disc of `radius` touches what is still left there, and no more.
+ */
+export function restPasses(
+  ground: Region,
+  leavings: Region,
+  radius: number,
+  stepover: number,
+  control?: WorkControl,
+): Track[][] {
+  return regionPieces(leavings).map((piece) => {
+    const passes: Track[] = [];
+    let left: Region = piece;
+    let level = ground;
+    while (left.length > 0 && level.length > 0) {
+      checkCancelled(control);
+      const runs = touchingRuns(level, left, radius);
+      passes.unshift(...runs.map(({ points, closed }) => trackOfPoints(points, closed)));
+      if (runs.length > 0) {
+        const swept = unionRegions(runs.map((run) => strokePolyline(run, radius - COVER_SLACK)));
+        left = withoutSlivers(differenceRegions(left, swept));
+      }
+      level = insetRegion(level, stepover);
+    }
+    return passes;
+  });
+}
+
+/** The stretches of a region's rings from which the disc touches what is left. */
+function touchingRuns(level: Region, left: Region, radius: number): Polyline[] {
+  const edge = createDistanceQuery(left);
+  const touches = (p: Vec) => edge.distance(p) < radius || regionContains(left, p);
+  return level.flatMap((ring) => runsOf(withStops(ring), touches));
+}
+
+function withStops(ring: Ring): Vec[] {
+  return ring.flatMap((a, i) => {
+    const b = ring[(i + 1) % ring.length]!;
+    const count = Math.max(1, Math.ceil(distance(a, b) / TEST_STEP));
+    return Array.from({ length: count }, (_, k) => lerp(a, b, k / count));
+  });
+}
+
+/** Stretches of consecutive points that pass, each with one more point at either end; all of them are a closed run. */
+function runsOf(points: readonly Vec[], passes: (p: Vec) => boolean): Polyline[] {
+  const flags = points.map(passes);
+  const first = flags.indexOf(false);
+  if (first < 0) return [{ points, closed: true }];
+  const runs: Polyline[] = [];
+  let run: Vec[] = [];
+  for (let i = 1; i <= points.length; i++) {
+    const at = (first + i) % points.length;
+    if (flags[at]) {
+      if (run.length === 0) run.push(points[(at + points.length - 1) % points.length]!);
+      run.push(points[at]!);
+    } else if (run.length > 0) {
+      runs.push({ points: [...run, points[at]!], closed: false });
+      run = [];
+    }
+  }
+  return runs;
+}
