@@ -32,7 +32,6 @@ function refuseOptions(cut: Cut, index: number): Problem[] {
       ...(cut.relief !== 'none' ? [refuse('relief', 'corner relief')] : []),
     ];
   }
-  if (cut.kind === 'taper-engrave') return [refuse('kind', 'a taper-engrave')];
   return [];
 }
 

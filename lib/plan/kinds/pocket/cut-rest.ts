@@ -2,15 +2,16 @@ import { checkCancelled } from '@/lib/base/cancel';
 import type { Region } from '@/lib/geometry/contour';
 import { orderTour } from '@/lib/geometry/tour';
 import { distance } from '@/lib/geometry/vec';
-import type { CutWork } from '../../shared/cut-work';
+import type { CutOf } from '@/lib/job/cut-schema';
 import { followRuns } from '../../shared/height-run';
 import { createLinkTest } from '../../shared/links';
 import type { MoveWriter } from '../../shared/move-writer';
 import { trackEnd } from '../../shared/order-tracks';
-import { reverseTrack, type Track } from '../../shared/track';
-import { comeDown, enterPass, linkTo } from './clear-ground';
+import { reverseTrack } from '../../shared/track';
+import { comeDown, enterPass, linkTo } from '../../clearing/clear-ground';
+import type { ClearingWork } from '../../clearing/enter-ground';
 import { leavingsOf } from './leavings';
-import { restPasses } from './rest-passes';
+import { restPasses } from '../../clearing/rest-passes';
 
 /** A longer way at depth than this many cutter diameters takes longer than going over the board. */
 const LONGEST_LINK = 5;
@@ -18,18 +19,18 @@ const LONGEST_LINK = 5;
 /** Cuts what an earlier pocket had to leave, place by place, each in all its layers. */
 export function cutRest(
   writer: MoveWriter,
-  work: CutWork<'pocket'>,
+  work: ClearingWork,
+  cut: CutOf<'pocket'>,
   area: Region,
   ground: Region,
   depths: readonly number[],
 ): void {
-  const { job, cut, cutter, resolved, control } = work;
+  const { job, cutter, resolved, control } = work;
   const earlier = job.cuts.find(({ id }) => id === cut.rest);
   if (earlier?.kind !== 'pocket') throw new Error(`No earlier pocket '${cut.rest}'`);
   const radius = cutter.diameter / 2;
   const leavings = leavingsOf(job, earlier, area, radius, resolved);
-  const stepover = (cut.stepover ?? cutter.speeds.stepover) * cutter.diameter;
-  const places = restPasses(ground, leavings, radius, stepover, control).filter(
+  const places = restPasses(ground, leavings, radius, work.spacing, control).filter(
     (passes) => passes.length > 0,
   );
   const mayLink = createLinkTest(ground);
@@ -38,7 +39,7 @@ export function cutRest(
     let above = -cut.start;
     for (const depth of depths) {
       checkCancelled(control);
-      for (const pass of places[index]!.map((track) => inDirection(track, cut.direction))) {
+      for (const pass of places[index]!.map((track) => (work.conventional ? reverseTrack(track) : track))) {
         if (pass.closed) {
           const begin = enterPass(writer, work, pass, mayLink, above, -depth);
           followRuns(writer, pass, [{ from: begin, to: begin + pass.length, zFrom: -depth, zTo: -depth }]);
@@ -54,8 +55,4 @@ export function cutRest(
       above = -depth;
     }
   }
-}
-
-function inDirection(track: Track, direction: 'climb' | 'conventional'): Track {
-  return direction === 'conventional' ? reverseTrack(track) : track;
 }

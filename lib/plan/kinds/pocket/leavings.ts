@@ -4,11 +4,8 @@ import type { CutOf } from '@/lib/job/cut-schema';
 import { cutterOf } from '@/lib/job/cut-values';
 import type { Job } from '@/lib/job/job-schema';
 import type { ResolvedOutlines } from '@/lib/outline/resolve-outlines';
-import { growRegion, insetRegion } from '../../shared/inset-region';
+import { openRegion, withoutSlivers } from '../../clearing/open-region';
 import { pocketArea } from './pocket-area';
-
-/** Leavings thinner than twice this are the two offsets' rounding, not wood, mm. */
-const THINNEST = 0.006;
 
 /**
  * What an earlier pocket had to leave of `area` and a disc of `radius` can reach: the area less the earlier cutter's
@@ -29,14 +26,4 @@ export function leavingsOf(
     earlier.allowance,
   );
   return withoutSlivers(intersectRegions(differenceRegions(area, reached), reachable));
-}
-
-/** All places that a disc of `radius` comes over while it stays in the region, `allowance` off its walls. */
-export function openRegion(region: Region, radius: number, allowance = 0): Region {
-  return growRegion(insetRegion(region, radius + allowance), radius);
-}
-
-export function withoutSlivers(region: Region): Region {
-  const core = insetRegion(region, THINNEST);
-  return core.length === 0 ? [] : intersectRegions(growRegion(core, 2 * THINNEST), region);
 }

@@ -5,7 +5,7 @@ import type { Region, Ring } from '@/lib/geometry/contour';
 import { regionContains } from '@/lib/geometry/measure';
 import { offsetRegion } from '@/lib/geometry/offset';
 import { regionPieces } from '@/lib/geometry/pieces';
-import { insetRegion } from '../../shared/inset-region';
+import { insetRegion } from '../shared/inset-region';
 import { simplifyRing } from '@/lib/geometry/simplify';
 
 /** Discs are taken this much smaller when looking for spots that passes missed, mm. */

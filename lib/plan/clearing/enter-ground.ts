@@ -1,15 +1,24 @@
 import type { Region } from '@/lib/geometry/contour';
 import { createDistanceQuery } from '@/lib/geometry/distance-query';
 import { regionContains } from '@/lib/geometry/measure';
+import type { Entry } from '@/lib/job/cut-schema';
 import { DEGREES, type Vec } from '@/lib/geometry/vec';
 import type { Finding } from '@/lib/report/report';
-import type { AnyCutWork, CutWork } from '../../shared/cut-work';
-import { descentAlong, plungeFindings, rampLength, type Descent } from '../../shared/entry';
-import { followRuns } from '../../shared/height-run';
-import type { LinkTest } from '../../shared/links';
-import type { MoveWriter } from '../../shared/move-writer';
-import { trackOfCircle, type Track } from '../../shared/track';
+import type { AnyCutWork } from '../shared/cut-work';
+import { descentAlong, plungeFindings, rampLength, type Descent } from '../shared/entry';
+import { followRuns } from '../shared/height-run';
+import type { LinkTest } from '../shared/links';
+import type { MoveWriter } from '../shared/move-writer';
+import { trackOfCircle, type Track } from '../shared/track';
 import { deepestPiece, somewhereIn, type InsetPiece } from './inset-rings';
+
+/** Clearing one piece of ground after another with one cutter. */
+export interface ClearingWork extends AnyCutWork {
+  readonly entry: Entry;
+  /** Distance of passes, mm. */
+  readonly spacing: number;
+  readonly conventional: boolean;
+}
 
 /** A helix is at most this share of the cutter's radius wide, so that no core stays in its middle… */
 const WIDEST_HELIX = 0.9;
@@ -29,15 +38,15 @@ export type GroundEntry =
  * enough for it and from which the first pass can be reached, else straight down.
  */
 export function chooseEntry(
-  work: CutWork<'pocket'>,
+  work: ClearingWork,
   piece: InsetPiece,
   passes: readonly Track[],
   mayLink: LinkTest,
   height: number,
 ): GroundEntry {
-  const { cut, cutter } = work;
+  const { entry, cutter } = work;
   const first = passes[0]!;
-  if (cut.entry.type === 'helix') {
+  if (entry.type === 'helix') {
     const circle = helixCircle(
       piece.region,
       deepestPiece(piece).region,
@@ -45,15 +54,15 @@ export function chooseEntry(
       first.start,
       mayLink,
     );
-    if (circle) return { kind: 'helix', circle, angle: cut.entry.angle };
+    if (circle) return { kind: 'helix', circle, angle: entry.angle };
   }
-  const ramp = rampLength(height, cut.entry.angle);
+  const ramp = rampLength(height, entry.angle);
   const isLongEnough = ({ length }: Track) => length * MOST_RAMP_LAPS >= ramp;
   const reachable = passes.filter((track, i) => i === 0 || mayLink(track.start, first.start));
   const track = reachable.find(isLongEnough) ?? first;
   const descent = isLongEnough(track)
-    ? descentAlong(work, cut.entry, track.length)
-    : descentAlong(work, cut.entry, 0);
+    ? descentAlong(work, entry, track.length)
+    : descentAlong(work, entry, 0);
   return { kind: 'along', track: descent.angle === null ? first : track, descent };
 }
 

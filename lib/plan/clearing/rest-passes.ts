@@ -6,9 +6,9 @@ import { regionContains } from '@/lib/geometry/measure';
 import { strokePolyline } from '@/lib/geometry/offset';
 import { regionPieces } from '@/lib/geometry/pieces';
 import { distance, lerp, type Vec } from '@/lib/geometry/vec';
-import { insetRegion } from '../../shared/inset-region';
-import { trackOfPoints, type Track } from '../../shared/track';
-import { withoutSlivers } from './leavings';
+import { insetRegion } from '../shared/inset-region';
+import { trackOfPoints, type Track } from '../shared/track';
+import { withoutSlivers } from './open-region';
 
 /** Distance of the places at which a pass is tested, mm. */
 const TEST_STEP = 0.1;

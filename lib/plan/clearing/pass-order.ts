@@ -1,6 +1,6 @@
 import { distance, type Vec } from '@/lib/geometry/vec';
-import { tracksOfRegion } from '../../shared/outline-tracks';
-import { nearestOnTrack, reverseTrack, startTrackAt, trackOfRing, type Track } from '../../shared/track';
+import { tracksOfRegion } from '../shared/outline-tracks';
+import { nearestOnTrack, reverseTrack, startTrackAt, trackOfRing, type Track } from '../shared/track';
 import type { InsetPiece } from './inset-rings';
 
 /**
