@@ -19,13 +19,12 @@ export async function checkReady(em: EntityManager): Promise<Health> {
 }
 
 async function whyNotReady(em: EntityManager): Promise<string | null> {
-  const connection = em.getConnection();
-  const off: { name: string }[] = await connection.execute(
+  const off: { name: string }[] = await em.execute(
     `select name from pg_settings where name in (${SAFE_SETTINGS.map(() => '?').join(', ')}) and setting = 'off'`,
     SAFE_SETTINGS,
   );
   if (off.length > 0) return `${off.map(({ name }) => name).join(', ')} is off`;
-  const done: { name: string }[] = await connection.execute('select name from schema_migrations');
+  const done: { name: string }[] = await em.execute('select name from schema_migrations');
   const names = new Set(done.map(({ name }) => name));
   const missing = ALL_MIGRATIONS.filter(({ name }) => !names.has(name));
   return missing.length > 0 ? `migrations are missing: ${missing.map(({ name }) => name).join(', ')}` : null;

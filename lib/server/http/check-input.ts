@@ -15,7 +15,7 @@ export function checkInput<S extends z.ZodType>(schema: S, value: unknown): z.ou
 export function invalid(problems: readonly Problem[]): ApiError {
   const first = problems[0] ?? { path: '$', message: 'is not right' };
   const more = problems.length > 1 ? ` (and ${problems.length - 1} more)` : '';
-  const detail = `${first.path} ${first.message.replace(/\.$/, '')}${more}.`;
+  const detail = `${first.path}: ${first.message.replace(/\.$/, '')}${more}.`;
   return new ApiError('invalid', detail, { problems: [...problems] });
 }
 
