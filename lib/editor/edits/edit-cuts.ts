@@ -66,3 +66,23 @@ export function moveCut(job: Job, id: string, by: number): Job {
   places.forEach((place, i) => (cuts[place] = order[i]!));
   return { ...job, cuts };
 }
+
+/**
+ * Sets one field of a cut, given by its key (`depth`, or `tabs.hold` for one within); undefined takes it out, so that
+ * its default holds again. Fails with a sentence where the document would no longer be right.
+ */
+export function setCutField(job: Job, id: string, key: string, value: unknown): Result<Job, string> {
+  const cut = job.cuts.find((other) => other.id === id);
+  if (!cut) return fail(`There is no cut '${id}' any more.`);
+  // What was put together from a key is a cut again once the document has been checked.
+  return replaceCut(job, withField(cut, key.split('.'), value) as Cut);
+}
+
+function withField(object: object, [key, ...rest]: readonly string[], value: unknown): object {
+  if (key === undefined) return object;
+  const inner: unknown = Reflect.get(object, key);
+  const next =
+    rest.length > 0 ? withField(typeof inner === 'object' && inner ? inner : {}, rest, value) : value;
+  if (next !== undefined) return { ...object, [key]: next };
+  return Object.fromEntries(Object.entries(object).filter(([other]) => other !== key));
+}
