@@ -4,6 +4,7 @@ import { useRouter } from 'next/navigation';
 import { Dialog } from '@/components/ui/dialog';
 import { Tabs } from '@/components/ui/tabs';
 import type { Project } from '@/lib/contracts/project';
+import { readDrawing } from './read-drawing';
 import { StartEmpty } from './start-empty';
 import { StartFromExample } from './start-from-example';
 import { StartFromFile } from './start-from-file';
@@ -33,7 +34,15 @@ export function NewProjectDialog({ way, onWayChange }: NewProjectDialogProps) {
         onChange={onWayChange}
         pages={[
           { value: 'empty', label: 'Empty board', content: <StartEmpty onMade={open} /> },
-          { value: 'file', label: 'SVG file', content: <StartFromFile onMade={open} /> },
+          ...(readDrawing
+            ? [
+                {
+                  value: 'file' as const,
+                  label: 'SVG file',
+                  content: <StartFromFile readDrawing={readDrawing} onMade={open} />,
+                },
+              ]
+            : []),
           { value: 'example', label: 'Example', content: <StartFromExample onMade={open} /> },
         ]}
       />
