@@ -6,8 +6,8 @@ const TEXT = 4.5;
 const GRAPHIC = 3;
 
 const pairs: readonly (readonly [front: string, back: string, least: number])[] = [
-  ...['ink', 'graphite', 'primary', 'face-a', 'face-b', 'tab-ink', 'ok', 'warning', 'error'].flatMap((front) =>
-    ['ground', 'sheet', 'well'].map((back) => [front, back, TEXT] as const),
+  ...['ink', 'graphite', 'primary', 'face-a', 'face-b', 'tab-ink', 'ok', 'warning', 'error'].flatMap(
+    (front) => ['ground', 'sheet', 'well'].map((back) => [front, back, TEXT] as const),
   ),
   ...['ok', 'warning', 'error'].map((tone) => [tone, `${tone}-wash`, TEXT] as const),
   ...['ok-wash', 'warning-wash', 'error-wash', 'select-wash'].map((back) => ['ink', back, TEXT] as const),
@@ -22,7 +22,9 @@ const pairs: readonly (readonly [front: string, back: string, least: number])[] 
   ['on-tab', 'tab', TEXT],
   ['on-error', 'error', TEXT],
   ['sheet', 'ink', TEXT],
-  ...['edge', 'focus'].flatMap((front) => ['ground', 'sheet', 'well'].map((back) => [front, back, GRAPHIC] as const)),
+  ...['edge', 'focus'].flatMap((front) =>
+    ['ground', 'sheet', 'well'].map((back) => [front, back, GRAPHIC] as const),
+  ),
   ['tab', 'bar', GRAPHIC],
   ['wood-edge', 'sheet', GRAPHIC],
 ];
@@ -47,7 +49,9 @@ function readThemes(): Record<'light' | 'dark', Record<string, string>> {
 }
 
 function tokensOf(css = ''): Record<string, string> {
-  return Object.fromEntries([...css.matchAll(/--([a-z0-9-]+): (#[0-9a-f]{6});/g)].map(([, name, hex]) => [name, hex]));
+  return Object.fromEntries(
+    [...css.matchAll(/--([a-z0-9-]+): (#[0-9a-f]{6});/g)].map(([, name, hex]) => [name, hex]),
+  );
 }
 
 function contrast(front = '', back = ''): number {
