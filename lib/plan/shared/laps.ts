@@ -24,58 +24,57 @@ export function cutLaps(writer: MoveWriter, laps: Laps, at = 0): void {
   else cutOpen(writer, laps);
 }
 
-function cutClosed(writer: MoveWriter, { track, top, layers, descent, tabs }: Laps, start: number): void {
+function cutClosed(writer: MoveWriter, laps: Laps, start: number): void {
+  const { track, top, layers, descent } = laps;
   writer.travelTo(pointAt(track, start));
-  writer.descendTo(-top);
   let s = start;
-  let z = -top;
+  let z = 0 - top;
   for (const depth of layers) {
     const ramp = descent.angle === null ? 0 : rampLength(z + depth, descent.angle);
-    if (ramp > 0) run(writer, track, { from: s, to: s + ramp, zFrom: z, zTo: -depth }, tabs);
+    run(writer, laps, track, { from: s, to: s + ramp, zFrom: z, zTo: -depth });
     s += ramp;
-    run(writer, track, { from: s, to: s + track.length, zFrom: -depth, zTo: -depth }, tabs);
+    run(writer, laps, track, { from: s, to: s + track.length, zFrom: -depth, zTo: -depth });
     s -= Math.floor(s / track.length) * track.length;
     z = -depth;
   }
 }
 
-function cutOpen(writer: MoveWriter, { track, top, layers, descent, tabs }: Laps): void {
-  let z = -top;
+function cutOpen(writer: MoveWriter, laps: Laps): void {
+  const { track, top, layers, descent } = laps;
+  let z = 0 - top;
   for (const depth of layers) {
     writer.travelTo(track.start);
-    writer.descendTo(z);
-    if (descent.angle !== null) zigzag(writer, { track, tabs }, z, -depth, descent.angle);
-    run(writer, track, { from: 0, to: track.length, zFrom: -depth, zTo: -depth }, tabs);
+    if (descent.angle !== null) zigzag(writer, laps, z, -depth, descent.angle);
+    run(writer, laps, track, { from: 0, to: track.length, zFrom: -depth, zTo: -depth });
     z = -depth;
   }
 }
 
 /** Down at the start of an open track, to and fro in an even number of legs (real angle ≤ the one asked for). */
-function zigzag(
-  writer: MoveWriter,
-  { track, tabs }: Pick<Laps, 'track' | 'tabs'>,
-  from: number,
-  to: number,
-  angle: number,
-): void {
+function zigzag(writer: MoveWriter, laps: Laps, from: number, to: number, angle: number): void {
+  const { track, tabs } = laps;
   const whole = rampLength(from - to, angle);
   if (whole === 0) return;
   const pairs = Math.max(1, Math.ceil(whole / (2 * track.length)));
   const leg = whole / (2 * pairs);
-  const back = reverseTrack(track);
   const turn = track.length - leg;
-  const tabsBack = tabs.map((tab) => ({ ...tab, at: track.length - tab.at }));
+  const lapsBack = { ...laps, tabs: tabs.map((tab) => ({ ...tab, at: track.length - tab.at })) };
+  const back = reverseTrack(track);
   for (let i = 0; i < pairs; i++) {
     const high = from + ((to - from) * i) / pairs;
     const low = from + ((to - from) * (i + 1)) / pairs;
     const middle = (high + low) / 2;
-    run(writer, track, { from: 0, to: leg, zFrom: high, zTo: middle }, tabs);
-    run(writer, back, { from: turn, to: track.length, zFrom: middle, zTo: low }, tabsBack);
+    run(writer, laps, track, { from: 0, to: leg, zFrom: high, zTo: middle });
+    run(writer, lapsBack, back, { from: turn, to: track.length, zFrom: middle, zTo: low });
   }
 }
 
-function run(writer: MoveWriter, track: Track, level: HeightRun, tabs: readonly TabLift[]): void {
-  followRuns(writer, track, liftOverTabs(level, tabs, track.closed ? track.length : Infinity));
+/** A stretch with its tabs; a cutter that comes from above goes straight down to where the stretch begins. */
+function run(writer: MoveWriter, { tabs }: Laps, track: Track, stretch: HeightRun): void {
+  if (stretch.to <= stretch.from) return;
+  const runs = liftOverTabs(stretch, tabs, track.closed ? track.length : Infinity);
+  writer.descendTo(runs[0]?.zFrom ?? stretch.zFrom);
+  followRuns(writer, track, runs);
 }
 
 /** A start that is not over a tab, so that the first descent is into the kerf. */

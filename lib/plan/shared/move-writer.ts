@@ -22,7 +22,7 @@ export interface MoveWriter {
   position(): Position | null;
   /** Retract if down, then rapid to stand over `p`. */
   travelTo(p: Vec): void;
-  /** Straight down to `z` over the present place: rapid to the approach height, the plunge feed from there. */
+  /** Straight to `z` over the present place: down to the approach height rapidly, the rest at the plunge feed. */
   descendTo(z: number): void;
   /** Straight feed to `p` at `z`, no faster down than the plunge feed. */
   feedTo(p: Vec, z: number): void;
