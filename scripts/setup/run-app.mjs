@@ -42,6 +42,8 @@ export async function runApp(mode, shutdown) {
     envFor: (address) => appEnvironment({ ...known, address }),
     shutdown,
   });
+  // Told to stop at the last moment: nothing to announce.
+  if (shutdown.isStopping()) return;
   announce(lockFile('app'), server.address);
   console.log(`\nSpindleaf is running at ${server.address}\n${seeded.trimEnd()}\nStop it with Ctrl-C.`);
 

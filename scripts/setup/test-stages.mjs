@@ -151,7 +151,9 @@ async function runVitest(run, name, args, env) {
  */
 async function runTool({ root, shutdown }, [program, ...args], env) {
   const file = path.join(root, 'node_modules', program);
-  const options = { cwd: root, env, shutdown, limit: 10 * MINUTE };
+  // A log is read as text; colour codes for each dot of it would be most of it.
+  const plain = process.stdout.isTTY ? {} : { NO_COLOR: '1', FORCE_COLOR: undefined };
+  const options = { cwd: root, env: { ...env, ...plain }, shutdown, limit: 10 * MINUTE };
   return (await runToEnd(process.execPath, [file, ...args], options)).code;
 }
 
