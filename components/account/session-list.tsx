@@ -12,6 +12,7 @@ import { sentenceOf } from '@/lib/client/api-error';
 import { useEndSession, useSessions, useSignOutEverywhere } from '@/lib/client/use-account';
 import { useForgetAccount } from '@/lib/client/use-me';
 import type { AccountSession } from '@/lib/contracts/account';
+import { deviceWords } from './device-words';
 import { SinceTime } from '@/components/ui/since-time';
 
 /** The devices on which the account is signed in, and the ways to end that. */
@@ -38,18 +39,19 @@ export function SessionList() {
 }
 
 function SessionRow({ session }: { session: AccountSession }) {
+  const device = deviceWords(session.device);
   const end = useEndSession();
   const toast = useToast();
   const signOut = () =>
     end.mutate(session.id, {
-      onSuccess: () => toast({ kind: 'ok', text: `Signed out: ${session.device}.` }),
+      onSuccess: () => toast({ kind: 'ok', text: `Signed out: ${device}.` }),
       onError: (error) => toast({ kind: 'error', text: sentenceOf(error) }),
     });
   return (
     <li className="flex flex-wrap items-center gap-x-4 gap-y-1 border-b border-rule py-2.5">
       <div className="grow">
         <p className="flex flex-wrap items-center gap-2 font-medium">
-          {session.device || 'Unknown device'}
+          {device}
           {session.current ? (
             <Tag tone="ok" icon="check">
               this one
@@ -62,7 +64,7 @@ function SessionRow({ session }: { session: AccountSession }) {
         </p>
       </div>
       {session.current ? null : (
-        <Button size="small" busy={end.isPending} onClick={signOut} aria-label={`Sign out ${session.device}`}>
+        <Button size="small" busy={end.isPending} onClick={signOut} aria-label={`Sign out ${device}`}>
           Sign out
         </Button>
       )}

@@ -7,10 +7,7 @@ import { HeaderBar } from '@/components/ui/header-bar';
 import { Logo } from '@/components/ui/logo';
 import { AccountMenu } from './account-menu';
 
-const places = [
-  { href: '/projects', label: 'Projects' },
-  { href: '/shop', label: 'Shop' },
-] as const;
+const places = [{ href: '/projects', label: 'Projects' }] as const;
 
 /** The header of the screens for people who are signed in, but for the bench, which fills the bar itself. */
 export function AppHeader() {
