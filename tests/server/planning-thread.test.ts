@@ -1,9 +1,21 @@
+import { Worker, type WorkerOptions } from 'node:worker_threads';
 import { describe, expect, it } from 'vitest';
 import { CancelledError } from '@/lib/base/cancel';
 import { parseJob } from '@/lib/job/parse-job';
 import type { Job } from '@/lib/job/job-schema';
-import { planningThread } from '@/lib/server/planning/planning-thread';
+import * as planning from '@/lib/server/planning/planning-thread';
 import { sampleJob, withValue } from '../helpers/sample-job';
+
+/** The thread from its source, which Node cannot run without the loader; a build has it compiled. */
+function startFromSource(options: WorkerOptions): Worker {
+  const source = new URL('../../lib/server/planning/planning.worker.ts', import.meta.url).href;
+  const code = `import('tsx/esm/api').then(({ register }) => (register(), import(${JSON.stringify(source)})));`;
+  return new Worker(code, { ...options, eval: true });
+}
+
+function planningThread(longestSeconds?: number) {
+  return planning.planningThread(longestSeconds, startFromSource);
+}
 
 const never = new AbortController().signal;
 
@@ -13,7 +25,6 @@ function job(change?: [path: string, to: unknown]): Job {
   return parsed.value;
 }
 
-// One test, because starting the thread from source takes a second or two.
 describe('the planning thread', () => {
   it('plans to the same bytes each time, and draws', { timeout: 60_000 }, async () => {
     const thread = planningThread();

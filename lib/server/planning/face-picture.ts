@@ -45,23 +45,23 @@ function upToLongest(parts: readonly string[]): string[] {
 
 function drawCut(job: Job, cut: Cut, outlines: ResolvedOutlines): string {
   const drawn = cut.outlines.map((id) => outlines.get(id, cut.face));
-  const share = cutFloor(job, cut) / job.board.z;
+  const floor = () => tone(cutFloor(job, cut) / job.board.z);
   switch (cut.kind) {
     case 'pocket':
     case 'bore':
     case 'taper-engrave':
-      return drawn.map((outline) => area(outline, tone(share))).join('');
+      return drawn.map((outline) => area(outline, floor())).join('');
     case 'surface':
       return drawn.length > 0
-        ? drawn.map((outline) => area(outline, tone(share))).join('')
-        : `<rect width="${short(job.board.x)}" height="${short(job.board.y)}" fill="${tone(share)}" stroke="none"/>`;
+        ? drawn.map((outline) => area(outline, floor())).join('')
+        : `<rect width="${short(job.board.x)}" height="${short(job.board.y)}" fill="${floor()}" stroke="none"/>`;
     case 'profile':
       return drawn.map((outline) => line(outline, 1.6)).join('');
     case 'chamfer':
     case 'engrave':
       return drawn.map((outline) => line(outline, 0.8)).join('');
     case 'drill':
-      return drawn.map((outline) => holes(job, cut, outline, tone(share))).join('');
+      return drawn.map((outline) => holes(job, cut, outline, floor())).join('');
     default:
       return assertNever(cut, 'cut');
   }

@@ -1,6 +1,6 @@
 import 'server-only';
 import path from 'node:path';
-import { Worker } from 'node:worker_threads';
+import { Worker, type WorkerOptions } from 'node:worker_threads';
 import { CancelledError } from '@/lib/base/cancel';
 import { ApiError } from '../http/api-error';
 import { invalid } from '../http/check-input';
@@ -26,16 +26,27 @@ export interface PlanningThread {
 
 /**
  * A thread for work that would hold up every request if it ran here. It starts with its first task, does one at a time,
- * and is ended and started anew when a task does not come back.
+ * and is ended and started anew when a task does not come back. `start` makes the thread; the bundler compiles the one
+ * that stands below.
  */
-export function planningThread(longestSeconds = LONGEST_SECONDS): PlanningThread {
+export function planningThread(longestSeconds = LONGEST_SECONDS, start = startWorker): PlanningThread {
   let worker: Worker | null = null;
   let last: Promise<unknown> = Promise.resolve();
+
+  function open(): Worker {
+    const data: ThreadData = { fontFolder: path.join(process.cwd(), 'public', 'fonts') };
+    const opened = start({ workerData: data });
+    // An error also ends the thread; whoever waits for it hears of it there.
+    opened.on('error', () => undefined);
+    opened.once('exit', () => (worker = null));
+    opened.unref();
+    return opened;
+  }
 
   function run<K extends TaskKind>(kind: K, ask: PlanningTasks[K]['ask'], signal: AbortSignal) {
     const result = last.then(() => {
       if (signal.aborted) throw new CancelledError();
-      worker ??= startWorker(() => (worker = null));
+      worker ??= open();
       return runOn(worker, kind, ask, signal, longestSeconds);
     });
     last = result.catch(() => undefined);
@@ -44,20 +55,8 @@ export function planningThread(longestSeconds = LONGEST_SECONDS): PlanningThread
   return { run };
 }
 
-function startWorker(onEnd: () => void): Worker {
-  const data: ThreadData = { fontFolder: path.join(process.cwd(), 'public', 'fonts') };
-  const file = new URL('./planning.worker.ts', import.meta.url);
-  // The bundler puts compiled code at this address; run from source, Node needs the loader for TypeScript.
-  const fromSource = file.protocol === 'file:' && file.pathname.endsWith('.ts');
-  const worker = new Worker(new URL('./planning.worker.ts', import.meta.url), {
-    workerData: data,
-    ...(fromSource && { execArgv: ['--import', 'tsx'] }),
-  });
-  // An error also ends the thread; whoever waits for it hears of it there.
-  worker.on('error', () => undefined);
-  worker.once('exit', onEnd);
-  worker.unref();
-  return worker;
+function startWorker(options: WorkerOptions): Worker {
+  return new Worker(new URL('./planning.worker.ts', import.meta.url), options);
 }
 
 async function runOn<K extends TaskKind>(
