@@ -82,6 +82,7 @@ export function PlanView({ view, onView }: { view: View | null; onView: (view: V
       className="relative h-full min-h-40 w-full overflow-hidden"
       role="application"
       aria-label={planWords(job, session.face)}
+      data-view={view ? `${view.scale} ${view.x} ${view.y}` : ''}
     >
       {size && palette && view ? (
         <>

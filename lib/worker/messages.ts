@@ -21,12 +21,6 @@ export type PlanningRequest =
       readonly to: Vec;
     };
 
-/** A program of the plan as the panel lists it; the text stays with the server, which hands it out. */
-export interface PlannedProgram {
-  readonly file: string;
-  readonly text: string;
-}
-
 export type PlanningAnswer =
   | { readonly type: 'progress'; readonly id: number; readonly share: number; readonly what: string }
   /** Cutter paths, as soon as they are known and before they are proven. */
@@ -40,7 +34,6 @@ export type PlanningAnswer =
       readonly type: 'proof';
       readonly id: number;
       readonly report: Report;
-      readonly programs: readonly PlannedProgram[];
       readonly pictures: Readonly<Record<Face, FacePixels | null>>;
     }
   /** The document cannot be planned: what is wrong, by place. */
