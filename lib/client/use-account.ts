@@ -14,7 +14,7 @@ export function useChangeAccount() {
   const queryClient = useQueryClient();
   return useMutation({
     mutationFn: (body: ChangeAccountBody) => callApi(ENDPOINTS.changeAccount, { body }),
-    onSuccess: (me) => queryClient.setQueryData(meKey, me),
+    onSuccess: () => queryClient.invalidateQueries({ queryKey: meKey }),
   });
 }
 
