@@ -12,13 +12,14 @@ export interface HeightField {
   readonly z: Float32Array;
 }
 
-/** An untouched field over a rectangle whose cells divide it evenly and are at most `step` wide. */
+/** An untouched field over a rectangle whose cells divide it evenly and are at most `step` wide and `stepY` deep. */
 export function createHeightField(
   box: { readonly x: number; readonly y: number; readonly width: number; readonly height: number },
   step: number,
+  stepY = step,
 ): HeightField {
   const columns = Math.max(1, Math.ceil(box.width / step - 1e-9));
-  const rows = Math.max(1, Math.ceil(box.height / step - 1e-9));
+  const rows = Math.max(1, Math.ceil(box.height / stepY - 1e-9));
   return {
     x: box.x,
     y: box.y,
