@@ -18,7 +18,8 @@ const COVER_SLACK = 0.01;
 
 /**
  * Passes over leavings, piece by piece, each piece from its innermost pass to the wall: the stretches of `ground`'s
- * boundary and its insets on which a disc of `radius` touches what is still left there, and no more.
+ * boundary and its insets on which a disc of `radius` touches what is still left there, and no more. Spots that remain
+ * in the middle get rounds of their own where the axis is `allowed`.
  */
 export function restPasses(
   ground: Region,
@@ -26,6 +27,7 @@ export function restPasses(
   radius: number,
   stepover: number,
   control?: WorkControl,
+  allowed: Region = ground,
 ): Track[][] {
   return regionPieces(leavings).map((piece) => {
     const passes: Track[] = [];
@@ -41,8 +43,16 @@ export function restPasses(
       }
       level = insetRegion(level, stepover);
     }
-    return passes;
+    return [...spotRounds(left, allowed), ...passes];
   });
+}
+
+/** Rounds about spots that lie deeper in than the last pass and wider apart than it reaches. */
+function spotRounds(left: Region, allowed: Region): Track[] {
+  return regionPieces(left)
+    .map(([outer]) => outer ?? [])
+    .filter((ring) => ring.length > 2 && ring.every((p) => regionContains(allowed, p)))
+    .map((ring) => trackOfPoints(ring, true));
 }
 
 /** The stretches of a region's rings from which the disc touches what is left. */

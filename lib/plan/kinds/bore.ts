@@ -81,7 +81,9 @@ export function boreRings(hole: number, cutter: number, stepover: number): numbe
   if (last <= first) return [last];
   const step = Math.min(stepover, cutter);
   const count = Math.ceil((last - first) / step - 1e-9);
-  return Array.from({ length: count + 1 }, (_, i) => first + ((last - first) * i) / count);
+  return Array.from({ length: count + 1 }, (_, i) =>
+    i === count ? last : first + ((last - first) * i) / count,
+  );
 }
 
 function tooLarge(work: CutWork<'bore'>, { center, radius }: Circle): Finding {

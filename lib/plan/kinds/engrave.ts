@@ -33,17 +33,17 @@ export function planEngrave(work: CutWork<'engrave'>): CutPlan {
     findings.push(...plungeFindings(work, descent, track.start));
     if (track.closed || descent.angle !== null)
       cutLaps(writer, { track, top: cut.start, layers, descent, tabs: [] });
-    else cutToAndFro(writer, track, cut.start, layers);
+    else cutToAndFro(writer, track, layers);
   }
   return planOf(work, writer.finish(), findings);
 }
 
 /** An open line layer by layer without lifting: forth on one layer, back on the next. */
-function cutToAndFro(writer: MoveWriter, track: Track, top: number, layers: readonly number[]): void {
+function cutToAndFro(writer: MoveWriter, track: Track, layers: readonly number[]): void {
   writer.travelTo(track.start);
-  writer.descendTo(-top);
   layers.forEach((depth, i) => {
     const way = i % 2 === 0 ? track : reverseTrack(track);
+    writer.descendTo(-depth);
     followRuns(writer, way, [{ from: 0, to: way.length, zFrom: -depth, zTo: -depth }]);
   });
 }

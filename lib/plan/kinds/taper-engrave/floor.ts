@@ -1,5 +1,6 @@
-import { differenceRegions } from '@/lib/geometry/boolean';
+import { differenceRegions, unionRegions } from '@/lib/geometry/boolean';
 import type { Region } from '@/lib/geometry/contour';
+import { strokePolyline } from '@/lib/geometry/offset';
 import { cutterById } from '@/lib/job/cut-values';
 import type { Position } from '@/lib/moves/move';
 import { moveLimits, type CutStep, type CutWork } from '../../shared/cut-work';
@@ -16,6 +17,9 @@ type TaperWork = CutWork<'taper-engrave'>;
 
 /** Chords of the V-bit's rounds, mm. */
 const ROUND_CHORD = 0.002;
+
+/** Neighbouring passes count as overlapping by this, mm. */
+const MEETING = 0.02;
 
 /** What the floor's own cutter does, and what of the floor it leaves. */
 export interface ClearedFloor {
@@ -52,15 +56,17 @@ export function clearFloor(work: TaperWork, floor: Region, cutterId: string): Cl
 
 /**
  * The V-bit's passes at the limit: once round every edge of the floor, which finishes the walls, and over what is left
- * of the floor at the V-bit's own step-over.
+ * of the floor at the V-bit's own step-over, so that no ridge is higher than step-over · D / (2 tan α).
  */
 export function floorPasses(work: TaperWork, floor: Region, left: Region): Position[][] {
   const { cut, cutter, control } = work;
   const z = -(cut.start + cut.depth);
-  const stepover = cutter.speeds.stepover * cutter.diameter;
-  const inner = insetRegion(floor, stepover);
-  const over =
-    left.length > 0 && inner.length > 0 ? restPasses(inner, left, stepover, stepover, control).flat() : [];
+  const spacing = cutter.speeds.stepover * cutter.diameter;
+  // Half the spacing on either side of a pass counts as cleared, and a hair more so that neighbours meet.
+  const reach = spacing / 2 + MEETING;
+  const rounds = floor.map((ring) => strokePolyline({ points: ring, closed: true }, spacing / 2));
+  const open = withoutSlivers(differenceRegions(left, unionRegions(rounds)));
+  const over = restPasses(insetRegion(floor, spacing), open, reach, spacing, control, floor).flat();
   return [...tracksOfRegion(floor), ...over].map((track) => positionsAt(track, z));
 }
 

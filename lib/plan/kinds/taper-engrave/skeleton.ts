@@ -30,6 +30,10 @@ const LEAST_DETOUR = 0.01;
 /** How far a straight joint into a corner may claim more room than there is, mm. */
 const JOINT_ERROR = 0.003;
 
+/** The room between two nodes is taken to change evenly within this, mm, and edges shorter than this are not divided. */
+const ROOM_ERROR = 0.001;
+const SHORTEST_EDGE = 0.01;
+
 /**
  * The skeleton (medial axis) of a region's inside, by the Voronoi diagram of boundary samples (dual of their Delaunay
  * triangulation), pruned by how much longer the boundary between an edge's two samples is than their chord. Distances
@@ -65,7 +69,21 @@ export function skeletonOf(region: Region): Skeleton {
     if (a >= 0 && b >= 0) edges.push([a, b]);
   }
   joinCorners(nodes, edges, samples.corners, edge);
-  return { nodes, edges };
+  return { nodes, edges: edges.flatMap(([a, b]) => divided(nodes, a, b, edge)) };
+}
+
+/**
+ * An edge in parts on which the room changes almost evenly: between two corners that point inward a bisector runs far
+ * without a sample of its own, and its room is least in its middle.
+ */
+function divided(nodes: SkeletonNode[], a: number, b: number, edge: DistanceQuery): [number, number][] {
+  const [p, q] = [nodes[a]!, nodes[b]!];
+  const middle = lerp(p, q, 0.5);
+  const room = edge.distance(middle);
+  const isEven = Math.abs(room - (p.distance + q.distance) / 2) <= ROOM_ERROR;
+  if (isEven || distance(p, q) < SHORTEST_EDGE) return [[a, b]];
+  const m = nodes.push({ ...middle, distance: room }) - 1;
+  return [...divided(nodes, a, m, edge), ...divided(nodes, m, b, edge)];
 }
 
 /** How much longer the way between two samples along their ring is than straight; infinite between two rings. */
