@@ -1,16 +1,17 @@
-import { Worker, type WorkerOptions } from 'node:worker_threads';
+import { Worker } from 'node:worker_threads';
 import { describe, expect, it } from 'vitest';
 import { CancelledError } from '@/lib/base/cancel';
 import { parseJob } from '@/lib/job/parse-job';
 import type { Job } from '@/lib/job/job-schema';
 import * as planning from '@/lib/server/planning/planning-thread';
+import type { ThreadData } from '@/lib/server/planning/planning-task';
 import { sampleJob, withValue } from '../helpers/sample-job';
 
 /** The thread from its source, which Node cannot run without the loader; a build has it compiled. */
-function startFromSource(options: WorkerOptions): Worker {
+function startFromSource(data: ThreadData): Worker {
   const source = new URL('../../lib/server/planning/planning.worker.ts', import.meta.url).href;
   const code = `import('tsx/esm/api').then(({ register }) => (register(), import(${JSON.stringify(source)})));`;
-  return new Worker(code, { ...options, eval: true });
+  return new Worker(code, { workerData: data, eval: true });
 }
 
 function planningThread(longestSeconds?: number) {

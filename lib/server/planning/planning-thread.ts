@@ -1,6 +1,6 @@
 import 'server-only';
 import path from 'node:path';
-import { Worker, type WorkerOptions } from 'node:worker_threads';
+import { Worker } from 'node:worker_threads';
 import { CancelledError } from '@/lib/base/cancel';
 import { ApiError } from '../http/api-error';
 import { invalid } from '../http/check-input';
@@ -35,7 +35,7 @@ export function planningThread(longestSeconds = LONGEST_SECONDS, start = startWo
 
   function open(): Worker {
     const data: ThreadData = { fontFolder: path.join(process.cwd(), 'public', 'fonts') };
-    const opened = start({ workerData: data });
+    const opened = start(data);
     // An error also ends the thread; whoever waits for it hears of it there.
     opened.on('error', () => undefined);
     opened.once('exit', () => (worker = null));
@@ -55,8 +55,9 @@ export function planningThread(longestSeconds = LONGEST_SECONDS, start = startWo
   return { run };
 }
 
-function startWorker(options: WorkerOptions): Worker {
-  return new Worker(new URL('./planning.worker.ts', import.meta.url), options);
+/** Written out like this, address and options in one call, or the bundler does not see that it is a thread to compile. */
+function startWorker(data: ThreadData): Worker {
+  return new Worker(new URL('./planning.worker.ts', import.meta.url), { workerData: data });
 }
 
 async function runOn<K extends TaskKind>(
