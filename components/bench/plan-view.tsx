@@ -44,15 +44,13 @@ export function PlanView({ view, onView }: { view: View | null; onView: (view: V
   const [pointer, setPointer] = useState<{ at: Vec; snapped: Snapped | null } | null>(null);
   const { setPin } = useCommentFocus();
   const panning = useSpaceHeld();
-  const latestScene = useRef(scene);
-  useEffect(() => {
-    latestScene.current = scene;
-  }, [scene]);
-
   const runner = useMemo(() => {
     const made = createToolRunner(editor, {
       readOnly,
-      outlinesWithin: (a, b) => outlinesWithin(latestScene.current, a, b),
+      outlinesWithin(a, b) {
+        const state = editor.store.getState();
+        return outlinesWithin(makeScene(seenJob(state), state.session.face), a, b);
+      },
       onComment(at) {
         const { face } = editor.store.getState().session;
         setPin({ kind: 'spot', face, x: round(at.x), y: round(at.y) });
@@ -61,7 +59,7 @@ export function PlanView({ view, onView }: { view: View | null; onView: (view: V
       onChange: () => setDraft(made.draft()),
     });
     return made;
-  }, [editor, readOnly, setPin, openPanel]);
+  }, [editor, makeScene, readOnly, setPin, openPanel]);
   useToolKeys(runner.send);
 
   useEffect(() => {

@@ -1,7 +1,7 @@
 'use client';
 
 import { useEffect, useState } from 'react';
-import type { FacePixels } from '@/lib/worker/face-pixels';
+import type { FacePixels } from '@/lib/proof/face-picture';
 
 /** A face's pixels as something a canvas can draw; null until they are there. */
 export function useFacePicture(pixels: FacePixels | null): ImageBitmap | null {

@@ -11,8 +11,8 @@ import type { Section } from '@/lib/proof/section';
 import type { TabPlace } from '@/lib/report/intent';
 import type { Problem } from '@/lib/report/problem';
 import type { Report } from '@/lib/report/report';
-import type { DrawnPath } from '@/lib/worker/drawn-paths';
-import type { FacePixels } from '@/lib/worker/face-pixels';
+import type { DrawnPath } from '@/lib/moves/drawn-path';
+import type { FacePixels } from '@/lib/proof/face-picture';
 import type { PlanningAnswer } from '@/lib/worker/messages';
 
 /** What is known of the plan. The last results stay until newer ones are there; `current` says whether they hold. */

@@ -1,4 +1,4 @@
-import type { DrawnPath } from '@/lib/worker/drawn-paths';
+import type { DrawnPath } from '@/lib/moves/drawn-path';
 import type { Palette } from './palette';
 import type { View } from './view';
 

@@ -13,7 +13,7 @@ import type { Vec } from '@/lib/geometry/vec';
 import { drawingLength } from '@/lib/job/format-length';
 import type { Job } from '@/lib/job/job-schema';
 import { zeroOf } from '@/lib/job/cut-values';
-import type { DrawnPath } from '@/lib/worker/drawn-paths';
+import type { DrawnPath } from '@/lib/moves/drawn-path';
 import { drawBoard, drawDimensions, drawGrid, drawZero } from './draw-board';
 import { drawDraft, drawPins, drawSectionLine, drawSnap, type Pin } from './draw-marks';
 import { drawOutlines } from './draw-outlines';

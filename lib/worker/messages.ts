@@ -5,8 +5,8 @@ import type { TabPlace } from '@/lib/report/intent';
 import type { Problem } from '@/lib/report/problem';
 import type { Report } from '@/lib/report/report';
 import type { Section } from '@/lib/proof/section';
-import type { DrawnPath } from './drawn-paths';
-import type { FacePixels } from './face-pixels';
+import type { DrawnPath } from '@/lib/moves/drawn-path';
+import type { FacePixels } from '@/lib/proof/face-picture';
 
 /** What the bench asks of its planning worker. `id` comes back with every answer. */
 export type PlanningRequest =

@@ -3,8 +3,8 @@ import { proveAndReport, type PlanResult } from '@/lib/pipeline/plan-job';
 import type { Job } from '@/lib/job/job-schema';
 import type { FontBook } from '@/lib/outline/fonts';
 import { sectionAlong } from '@/lib/proof/section';
-import { drawnPath } from './drawn-paths';
-import { facePixels } from './face-pixels';
+import { drawnPath } from '@/lib/moves/drawn-path';
+import { facePixels } from '@/lib/proof/face-picture';
 import type { PlanningAnswer, PlanningRequest } from './messages';
 
 /**
@@ -27,14 +27,16 @@ self.onmessage = (event: MessageEvent<PlanningRequest>): void => {
       break;
     case 'section': {
       const { id, face, from, to } = request;
-      post({ type: 'section', id, section: result ? sectionAlong(result.board, face, from, to) : null });
+      post({ type: 'section', id, section: result ? sectionAlong(result.board, from, to, face) : null });
     }
   }
 };
 
 function plan(id: number, job: Job): void {
   try {
-    const control = { onProgress: (share: number, what: string) => post({ type: 'progress', id, share, what }) };
+    const control = {
+      onProgress: (share: number, what: string) => post({ type: 'progress', id, share, what }),
+    };
     const paths = planPaths(job, fonts, control);
     if (!paths.ok) return post({ type: 'problems', id, problems: paths.error });
     post({ type: 'paths', id, paths: paths.value.steps.map(drawnPath), tabs: paths.value.tabs });

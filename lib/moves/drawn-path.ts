@@ -1,12 +1,11 @@
-import type { CutMoves } from '@/lib/moves/cut-moves';
-import type { ArcMove, Position } from '@/lib/moves/move';
-import type { Face } from '@/lib/job/numbers';
+import type { CutMoves } from './cut-moves';
+import type { ArcMove, Position } from './move';
 
 /** A cut's moves as lines to draw, in the view of its face, mm: runs of x, y pairs in one array each. */
 export interface DrawnPath {
   readonly cut: string;
   readonly cutter: string;
-  readonly face: Face;
+  readonly face: 'A' | 'B';
   /** Feeds: each run is a polyline. */
   readonly feeds: readonly Float32Array[];
   /** Rapids over the work, one polyline each. */
