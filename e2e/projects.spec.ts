@@ -151,8 +151,8 @@ for (const colorScheme of ['light', 'dark'] as const) {
 
       await page.getByRole('button', { name: 'New project' }).click();
       await expect(page.getByRole('dialog')).toBeVisible();
-      for (const way of ['Empty board', 'SVG file', 'Example']) {
-        await page.getByRole('tab', { name: way }).click();
+      for (const way of await page.getByRole('tab').all()) {
+        await way.click();
         expect((await new AxeBuilder({ page }).analyze()).violations.map(({ id }) => id)).toEqual([]);
       }
     });
