@@ -1,6 +1,6 @@
 // @ts-check
 /**
- * `npm run --silent plan -- …`: bundles scripts/plan.ts and runs it. The bundle is made anew whenever a source has
+ * `npm run --silent plan -- …`: bundles scripts/plan-command.ts and runs it. The bundle is made anew whenever a source has
  * changed, and kept under node_modules/.cache, so that starting costs little and nothing stale is ever run.
  */
 import path from 'node:path';
@@ -8,8 +8,8 @@ import { fileURLToPath, pathToFileURL } from 'node:url';
 import { freshBundle } from './bundle-script.mjs';
 
 const root = fileURLToPath(new URL('..', import.meta.url));
-const bundle = await freshBundle(root, path.join(root, 'scripts', 'plan.ts'));
-/** @type {typeof import('./plan')} */
+const bundle = await freshBundle(root, path.join(root, 'scripts', 'plan-command.ts'));
+/** @type {typeof import('./plan-command')} */
 const { runPlan } = await import(pathToFileURL(bundle).href);
 process.exitCode = runPlan(process.argv.slice(2), {
   fonts: path.join(root, 'public', 'fonts'),

@@ -1,22 +1,24 @@
-import type { Region } from '@/lib/geometry/contour';
-import { createDistanceQuery } from '@/lib/geometry/distance-query';
+import type { Region, Ring } from '@/lib/geometry/contour';
 import { ringArea } from '@/lib/geometry/measure';
 import { offsetRegion } from '@/lib/geometry/offset';
 import { regionPieces } from '@/lib/geometry/pieces';
+import { add, distance, dot, scale, subtract, type Vec } from '@/lib/geometry/vec';
 
-/** Insets lie this near to the distance they were asked for, mm. */
-const INSET_ERROR = 0.02;
+/** Offsets lie this near to the distance they were asked for, mm. */
+const OFFSET_ERROR = 0.02;
+
+/** Points of a ring that are looked at: a ring that turned inside out is wrong at every one of its points. */
+const CHECKED_POINTS = 3;
 
 /**
- * The places of a region that are at least `by` mm inside it. Each piece is checked against the exact distance: an
- * inset curve of a region that is narrower than the inset turns inside out and may seem to leave something.
+ * The places of a region that are at least `by` mm inside it. Each piece is checked against the exact distance: the
+ * offset curve of a region that is narrower than the inset turns inside out and may seem to leave something.
  */
 export function insetRegion(region: Region, by: number): Region {
   const inset = offsetRegion(region, -by);
-  if (inset.length === 0 || by === 0) return inset;
-  const edge = createDistanceQuery(region);
+  if (by === 0) return inset;
   return regionPieces(inset)
-    .filter(([outer]) => outer?.every((p) => edge.distance(p) >= by - INSET_ERROR))
+    .filter(([outer]) => outer && isAway(outer, region, by))
     .flat();
 }
 
@@ -26,9 +28,28 @@ export function insetRegion(region: Region, by: number): Region {
  */
 export function growRegion(region: Region, by: number, corners: 'round' | 'sharp' = 'round'): Region {
   const grown = offsetRegion(region, by, { corners });
-  if (grown.length === 0 || by === 0) return grown;
-  const edge = createDistanceQuery(region);
-  return grown.filter(
-    (ring) => ringArea(ring) > 0 || ring.every((p) => edge.distance(p) >= by - INSET_ERROR),
-  );
+  if (by === 0) return grown;
+  return grown.filter((ring) => ringArea(ring) > 0 || isAway(ring, region, by));
+}
+
+function isAway(ring: Ring, region: Region, by: number): boolean {
+  for (let i = 0; i < CHECKED_POINTS; i++) {
+    const p = ring[Math.floor((i * ring.length) / CHECKED_POINTS)];
+    if (p && distanceToEdges(region, p) < by - OFFSET_ERROR) return false;
+  }
+  return true;
+}
+
+function distanceToEdges(region: Region, p: Vec): number {
+  let least = Infinity;
+  for (const ring of region) {
+    for (let i = 0; i < ring.length; i++) {
+      const a = ring[i]!;
+      const along = subtract(ring[(i + 1) % ring.length]!, a);
+      const size = dot(along, along);
+      const t = size > 0 ? Math.min(1, Math.max(0, dot(subtract(p, a), along) / size)) : 0;
+      least = Math.min(least, distance(p, add(a, scale(along, t))));
+    }
+  }
+  return least;
 }

@@ -26,9 +26,10 @@ export function planPocket(work: PocketWork): CutPlan {
   const { job, cut, cutter } = work;
   const radius = cutter.diameter / 2;
   const area = pocketArea(job, cut, work.resolved);
-  const findings = [...doesNotFit(work, area, radius + cut.allowance)];
+
   const depths = layerDepths(cut.start, cutFloor(job, cut), work.stepdown);
   const ground = insetRegion(area, radius + cut.allowance);
+  const findings = doesNotFit(work, area, ground);
   const clearing: ClearingWork = {
     ...work,
     entry: cut.entry,
@@ -57,8 +58,8 @@ function finishWalls(writer: MoveWriter, { cut, control }: PocketWork, ground: R
   }
 }
 
-function doesNotFit(work: PocketWork, area: Region, radius: number): Finding[] {
-  return unreachablePieces(area, radius).map((piece) => {
+function doesNotFit(work: PocketWork, area: Region, ground: Region): Finding[] {
+  return unreachablePieces(area, ground).map((piece) => {
     const at = piece[0]?.[0];
     const message = `${cutName(work)}: ${work.cutter.name} does not fit into this part of the pocket.`;
     return cutFinding(work, 'cutter-too-large', message, at);

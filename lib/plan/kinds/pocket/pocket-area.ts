@@ -1,6 +1,6 @@
 import { evenOddRegions } from '@/lib/geometry/boolean';
 import type { Region } from '@/lib/geometry/contour';
-import { insetRegion } from '../../shared/inset-region';
+import { regionContains } from '@/lib/geometry/measure';
 import { regionPieces } from '@/lib/geometry/pieces';
 import type { CutOf } from '@/lib/job/cut-schema';
 import { cutterOf } from '@/lib/job/cut-values';
@@ -15,7 +15,9 @@ export function pocketArea(job: Job, cut: CutOf<'pocket'>, resolved: ResolvedOut
   return runOutRegion(combined, job.board, cutterOf(job, cut).diameter / 2 + 1);
 }
 
-/** Pieces of an area into which a disc of that radius does not go at all. */
-export function unreachablePieces(area: Region, radius: number): Region[] {
-  return regionPieces(area).filter((piece) => insetRegion(piece, radius).length === 0);
+/** Pieces of an area that hold no place for the cutter's axis, `ground` being all such places of the area. */
+export function unreachablePieces(area: Region, ground: Region): Region[] {
+  return regionPieces(area).filter(
+    (piece) => !ground.some(([place]) => place !== undefined && regionContains(piece, place)),
+  );
 }
