@@ -13,6 +13,7 @@ let folder: string;
 
 beforeAll(() => {
   folder = mkdtempSync(path.join(os.tmpdir(), 'plan-command-'));
+  run(save('good.json', sampleJob()), '--out', 'good');
 });
 afterAll(() => rmSync(folder, { recursive: true, force: true }));
 
@@ -49,7 +50,7 @@ function thinTabs() {
 
 describe('plan', () => {
   it('writes programs and a report, exit code 0', () => {
-    const { code, err } = run(save('good.json', sampleJob()), '--out', 'good');
+    const { code, err } = run('good.json', '--out', 'good');
     expect({ code, err }).toEqual({ code: 0, err: '' });
     expect(readdirSync(path.join(folder, 'good')).sort()).toEqual([
       '01-B-flat6.nc',

@@ -1,8 +1,8 @@
 import { checkCancelled, type WorkControl } from '@/lib/base/cancel';
 import { differenceRegions, unionRegions } from '@/lib/geometry/boolean';
-import type { Polyline, Region, Ring } from '@/lib/geometry/contour';
+import type { Box, Polyline, Region, Ring } from '@/lib/geometry/contour';
 import { createDistanceQuery } from '@/lib/geometry/distance-query';
-import { regionContains } from '@/lib/geometry/measure';
+import { regionBox, regionContains } from '@/lib/geometry/measure';
 import { strokePolyline } from '@/lib/geometry/offset';
 import { regionPieces } from '@/lib/geometry/pieces';
 import { distance, lerp, type Vec } from '@/lib/geometry/vec';
@@ -57,17 +57,35 @@ function spotRounds(left: Region, allowed: Region): Track[] {
 
 /** The stretches of a region's rings from which the disc touches what is left. */
 function touchingRuns(level: Region, left: Region, radius: number): Polyline[] {
+  const box = regionBox(left);
+  const near: Box = {
+    minX: box.minX - radius,
+    minY: box.minY - radius,
+    maxX: box.maxX + radius,
+    maxY: box.maxY + radius,
+  };
   const edge = createDistanceQuery(left);
-  const touches = (p: Vec) => edge.distance(p) < radius || regionContains(left, p);
-  return level.flatMap((ring) => runsOf(withStops(ring), touches));
+  const touches = (p: Vec) => boxMeets(near, p, p) && (edge.distance(p) < radius || regionContains(left, p));
+  return level.flatMap((ring) => runsOf(withStops(ring, near), touches));
 }
 
-function withStops(ring: Ring): Vec[] {
+/** A ring's points with more of them between, where it comes near the box. */
+function withStops(ring: Ring, near: Box): Vec[] {
   return ring.flatMap((a, i) => {
     const b = ring[(i + 1) % ring.length]!;
-    const count = Math.max(1, Math.ceil(distance(a, b) / TEST_STEP));
+    const count = boxMeets(near, a, b) ? Math.max(1, Math.ceil(distance(a, b) / TEST_STEP)) : 1;
     return Array.from({ length: count }, (_, k) => lerp(a, b, k / count));
   });
+}
+
+/** Whether the box about two points meets a box. */
+function boxMeets(box: Box, a: Vec, b: Vec): boolean {
+  return (
+    Math.max(a.x, b.x) >= box.minX &&
+    Math.min(a.x, b.x) <= box.maxX &&
+    Math.max(a.y, b.y) >= box.minY &&
+    Math.min(a.y, b.y) <= box.maxY
+  );
 }
 
 /** Stretches of consecutive points that pass, each with one more point at either end; all of them are a closed run. */
