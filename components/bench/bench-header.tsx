@@ -95,7 +95,8 @@ function End() {
         ))}
       </div>
       <Button variant="tab" onClick={() => openPanel('programs')}>
-        Programs{programs > 0 ? ` · ${programs}` : ''}
+        Programs
+        {programs > 0 ? <span className="max-sm:hidden">· {programs}</span> : null}
       </Button>
       <div className="lg:hidden">
         <Menu trigger={<IconButton variant="bar" icon="more" label="More of this project" tooltip="none" />}>

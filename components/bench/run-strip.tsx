@@ -17,11 +17,11 @@ export function RunStrip() {
   const changes = planning.report ? Math.max(0, planning.report.programs.length - 1) : 0;
   return (
     <section aria-label="At the machine" className="border-t border-rule bg-sheet px-4 py-2">
-      <h2 className="flex items-baseline gap-3 text-lg">
+      <h2 className="flex items-baseline gap-3 text-lg whitespace-nowrap">
         At the machine
         <span
           className={classNames(
-            'font-sans text-sm font-normal text-graphite',
+            'truncate font-sans text-sm font-normal text-graphite',
             !planning.current && 'opacity-60',
           )}
         >

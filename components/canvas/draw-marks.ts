@@ -2,7 +2,7 @@ import type { Vec } from '@/lib/geometry/vec';
 import type { SectionLine } from '@/lib/editor/session';
 import type { Draft } from '@/lib/editor/tools/tool';
 import type { Polyline } from '@/lib/geometry/contour';
-import { LETTER_FONT, type Palette } from './palette';
+import { LETTER_FONT, ON_WOOD, type Palette } from './palette';
 import { tracePolyline } from './draw-outlines';
 import { toScreen, type View } from './view';
 
@@ -16,6 +16,7 @@ export function drawSectionLine(
   context: Context,
   view: View,
   { from, to }: SectionLine,
+  board: { x: number; y: number },
   palette: Palette,
 ): void {
   const a = toScreen(view, from);
@@ -31,6 +32,15 @@ export function drawSectionLine(
   context.lineWidth = 1.25;
   context.setLineDash([18, 4, 3, 4]);
   stroke(context, a, b);
+  // On the board itself in the ink that stands out on wood, in either theme.
+  const corner = toScreen(view, { x: 0, y: board.y });
+  context.save();
+  context.beginPath();
+  context.rect(corner.x, corner.y, board.x * view.scale, board.y * view.scale);
+  context.clip();
+  context.strokeStyle = ON_WOOD;
+  stroke(context, a, b);
+  context.restore();
   context.setLineDash([]);
   context.font = LETTER_FONT;
   context.textAlign = 'center';

@@ -18,7 +18,7 @@ export function drawOutlines(
   },
   palette: Palette,
 ): void {
-  const far = scene.face === 'A' ? palette.faceB : palette.faceA;
+  const far = scene.face === 'A' ? palette.faceBOnWood : palette.faceAOnWood;
   for (const outline of scene.outlines) {
     const isFar = outline.drawnOn !== scene.face;
     if (isFar && !look.farFace) continue;

@@ -1,5 +1,5 @@
 import type { DrawnPath } from '@/lib/moves/drawn-path';
-import type { Palette } from './palette';
+import { ON_WOOD, type Palette } from './palette';
 import type { View } from './view';
 
 type Context = CanvasRenderingContext2D;
@@ -16,11 +16,11 @@ export function drawPaths(
   for (const path of paths) {
     const isChosen = path.cut === look.cut;
     const quiet = look.dimmed ? 0.35 : 1;
-    const ink = path.face === 'A' ? palette.faceA : palette.faceB;
+    const ink = path.face === 'A' ? palette.faceAOnWood : palette.faceBOnWood;
     if (look.rapids) {
       context.globalAlpha = 0.3 * quiet;
       context.setLineDash([3, 4]);
-      strokeRuns(context, view, path.rapids, palette.graphite, 1);
+      strokeRuns(context, view, path.rapids, ON_WOOD, 1);
       context.setLineDash([]);
     }
     context.globalAlpha = (look.cut === null ? 0.75 : isChosen ? 1 : 0.28) * quiet;

@@ -43,26 +43,31 @@ export function drawSection(
 ): void {
   const place = (p: Vec): Vec => ({ x: scale.x + p.x * scale.along, y: scale.y - p.y * scale.up });
   traceBoard(context, scale, drawing, palette);
-  context.beginPath();
-  for (const ring of drawing.wood) {
-    ring.forEach((point, i) => {
-      const { x, y } = place(point);
-      if (i === 0) context.moveTo(x, y);
-      else context.lineTo(x, y);
-    });
-    context.closePath();
-  }
+  const wood = woodPath(drawing, place);
   context.fillStyle = palette.board;
-  context.fill('evenodd');
+  context.fill(wood, 'evenodd');
   context.save();
-  context.clip('evenodd');
+  context.clip(wood, 'evenodd');
   hatch(context, scale, drawing, palette);
   context.restore();
   context.strokeStyle = palette.boardEdge;
   context.lineWidth = 1.75;
-  context.stroke();
+  context.stroke(wood);
   for (const tab of drawing.tabs) drawTab(context, place, tab, palette);
   drawLetters(context, scale, drawing, words, palette);
+}
+
+function woodPath({ wood }: SectionDrawing, place: (p: Vec) => Vec): Path2D {
+  const path = new Path2D();
+  for (const ring of wood) {
+    ring.forEach((point, i) => {
+      const { x, y } = place(point);
+      if (i === 0) path.moveTo(x, y);
+      else path.lineTo(x, y);
+    });
+    path.closePath();
+  }
+  return path;
 }
 
 /** Where the whole board was: a thin broken line, so that what is cut away is seen. */

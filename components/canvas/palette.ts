@@ -7,6 +7,9 @@ export interface Palette {
   readonly rule: string;
   readonly faceA: string;
   readonly faceB: string;
+  /** The faces' colours where they must stand out on wood, which is pale in both themes. */
+  readonly faceAOnWood: string;
+  readonly faceBOnWood: string;
   readonly tab: string;
   readonly tabInk: string;
   readonly board: string;
@@ -29,6 +32,8 @@ export function readPalette(element: Element): Palette {
     rule: token('rule'),
     faceA: token('face-a'),
     faceB: token('face-b'),
+    faceAOnWood: token('face-a-fill'),
+    faceBOnWood: token('face-b-fill'),
     tab: token('tab'),
     tabInk: token('tab-ink'),
     board: token('depth-0'),

@@ -117,7 +117,7 @@ export function PlanCanvas(props: PlanCanvasProps) {
         <Layer listening={false}>
           <Drawing
             draw={(context) => {
-              drawSectionLine(context, view, session.section, palette);
+              drawSectionLine(context, view, session.section, job.board, palette);
               drawPins(context, view, props.pins, palette);
               if (draft) drawDraft(context, view, draft.draft, draft.lines, palette);
               if (isDrawing && hover.snapped?.name) drawSnap(context, view, hover.snapped.at, palette);
