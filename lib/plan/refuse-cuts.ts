@@ -6,7 +6,7 @@ import type { ResolvedOutlines } from '@/lib/outline/resolve-outlines';
 import type { Problem } from '@/lib/report/problem';
 import { circlesOf } from './shared/outline-circles';
 
-/** What planning cannot do with a document that is otherwise right, by place: it is refused, never left out silently. */
+/** What cannot be planned of a document that is otherwise right, by place: it is refused, never left out silently. */
 export function refuseCuts(job: Job, outlines: ResolvedOutlines): Problem[] {
   return job.cuts.flatMap((cut, index) =>
     cut.enabled
@@ -15,21 +15,21 @@ export function refuseCuts(job: Job, outlines: ResolvedOutlines): Problem[] {
   );
 }
 
+/** Options that say nothing together. */
 function refuseOptions(cut: Cut, index: number): Problem[] {
-  const refuse = (key: string, what: string): Problem => ({
-    path: `cuts[${index}].${key}`,
-    message: `${what} cannot be planned yet.`,
-  });
-  if (cut.kind === 'pocket') {
+  const refuse = (key: string, message: string): Problem => ({ path: `cuts[${index}].${key}`, message });
+  if (cut.kind === 'pocket' && cut.rest !== null) {
     return [
-      ...(cut.pattern === 'raster' ? [refuse('pattern', 'a raster pocket')] : []),
-      ...(cut.relief !== 'none' ? [refuse('relief', 'corner relief')] : []),
+      ...(cut.pattern === 'raster' ? [refuse('pattern', 'a rest cut follows walls; it has no raster.')] : []),
+      ...(cut.relief !== 'none'
+        ? [refuse('relief', 'a rest cut makes no relief; ask the earlier pocket for it.')]
+        : []),
     ];
   }
-  if (cut.kind === 'profile') {
+  if (cut.kind === 'profile' && cut.side === 'on') {
     return [
-      ...(cut.lead.type !== 'none' ? [refuse('lead', 'a lead')] : []),
-      ...(cut.relief !== 'none' ? [refuse('relief', 'corner relief')] : []),
+      ...(cut.lead.type !== 'none' ? [refuse('lead', "a lead needs side 'outside' or 'inside'.")] : []),
+      ...(cut.relief !== 'none' ? [refuse('relief', "a relief needs side 'outside' or 'inside'.")] : []),
     ];
   }
   return [];

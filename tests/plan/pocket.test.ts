@@ -183,6 +183,41 @@ describe('pocket', () => {
     expect(Math.max(...rest.map((p) => Math.min(p.y - 30, 60 - p.y)))).toBeLessThan(4);
   });
 
+  it.each([0, 37, 90])('clears by raster at %s° too', (angle) => {
+    const planned = plan(
+      [polygon('a', DUMBBELL)],
+      [{ ...POCKET, outlines: ['a'], pattern: 'raster', angle, stepover: 0.6 }],
+    );
+    checkPocket(planned, [DUMBBELL], 3);
+    expect(rapidsBelow(planned)).toBe(0);
+  });
+
+  it('relieves corners until a square part fits (check value C042: r = 3: centre (2.1213, 2.1213))', () => {
+    const planned = plan([polygon('a', BOX)], [{ ...POCKET, outlines: ['a'], relief: 'dogbone' }]);
+    const floor = samples(stepOf(planned, 'p'), 0.05).filter(({ z, rapid }) => z < -2.99 && !rapid);
+    const cutter = cutterOfCut(planned.job, { cutter: 'flat6' });
+    for (const corner of BOX) {
+      const inward = { x: corner.x < 60 ? 1 : -1, y: corner.y < 45 ? 1 : -1 };
+      const centre = { x: corner.x + inward.x * 2.1213, y: corner.y + inward.y * 2.1213 };
+      expect(Math.min(...floor.map((p) => Math.hypot(p.x - centre.x, p.y - centre.y)))).toBeLessThan(0.01);
+      const hair = { x: corner.x + inward.x * 0.01, y: corner.y + inward.y * 0.01 };
+      expect(woodAt(floor, cutter, hair)).toBeLessThan(-2.99);
+    }
+    // Nowhere further over a wall than the relief asks for: r (1 − 1/√2).
+    const over = Math.max(...floor.map((p) => Math.max(40 - p.x, p.x - 80, 30 - p.y, p.y - 60) + 3));
+    expect(over).toBeCloseTo(3 * (1 - Math.SQRT1_2), 2);
+  });
+
+  it('leaves an allowance on its walls, or takes it off with a last pass', () => {
+    const nearest = (change: object) => {
+      const planned = plan([polygon('a', BOX)], [{ ...POCKET, outlines: ['a'], allowance: 0.4, ...change }]);
+      const run = samples(stepOf(planned, 'p')).filter(({ z, rapid }) => z < -1 && !rapid);
+      return Math.min(...run.map((p) => distanceToPoints(BOX, p)));
+    };
+    expect(nearest({})).toBeCloseTo(3.4, 2);
+    expect(nearest({ finish: true })).toBeCloseTo(3, 2);
+  });
+
   it('holds for random polygons', { timeout: 60_000 }, () => {
     const radii = fc.array(fc.double({ min: 6, max: 28, noNaN: true }), { minLength: 5, maxLength: 11 });
     const stepover = fc.double({ min: 0.2, max: 0.95, noNaN: true });

@@ -144,4 +144,40 @@ describe('profile', () => {
     expect(near.filter(({ z }) => Math.abs(z + 18.3) < 1e-6).length).toBeGreaterThan(500);
     expect(cutterOfCut(planned.job, { cutter: 'flat6' }).diameter).toBe(6);
   });
+
+  it.each([
+    ['line', 'outside', 'climb'],
+    ['arc', 'outside', 'climb'],
+    ['arc', 'outside', 'conventional'],
+    ['line', 'inside', 'climb'],
+    ['arc', 'inside', 'conventional'],
+  ] as const)('comes in by a %s in the waste, %s, %s', (type, side, direction) => {
+    const planned = plan(
+      [path('l', L_SHAPE)],
+      [{ ...THROUGH, id: 'c', outlines: ['l'], side, direction, lead: { type, length: 4 } }],
+    );
+    const run = samples(stepOf(planned, 'c')).filter(({ z, rapid }) => z < -1e-6 && !rapid);
+    expect(Math.min(...run.map((p) => distanceToPoints(L_POINTS, p)))).toBeGreaterThan(2.98);
+    expect(run.every((p) => inside(L_POINTS, p) === (side === 'inside'))).toBe(true);
+    // The ramps lie off the line: on the line itself every place is at a layer's depth.
+    const layers = [1, 2, 3, 4, 5, 6, 7].map((i) => -(18.3 * i) / 7);
+    const offLayer = run.filter(
+      (p) => distanceToPoints(L_POINTS, p) < 3.05 && !layers.some((z) => Math.abs(z - p.z) < 1e-6),
+    );
+    expect(offLayer).toEqual([]);
+    expect(run.some((p) => distanceToPoints(L_POINTS, p) > 6)).toBe(true);
+  });
+
+  it('relieves the inner corners of a part and of a hole', () => {
+    const outside = plan(
+      [path('l', L_SHAPE)],
+      [{ ...THROUGH, id: 'c', outlines: ['l'], side: 'outside', relief: 'dogbone' }],
+    );
+    const run = samples(stepOf(outside, 'c'), 0.05).filter(({ z }) => z < -18);
+    const fromNotch = run.map(({ x, y }) => Math.hypot(x - 50, y - 50));
+    expect(Math.min(...fromNotch)).toBeCloseTo(3, 2);
+    const plain = plan([path('l', L_SHAPE)], [{ ...THROUGH, id: 'c', outlines: ['l'], side: 'outside' }]);
+    const kept = samples(stepOf(plain, 'c'), 0.05).filter(({ z }) => z < -18);
+    expect(Math.min(...kept.map(({ x, y }) => Math.hypot(x - 50, y - 50)))).toBeCloseTo(3 * Math.SQRT2, 2);
+  });
 });

@@ -48,7 +48,7 @@ export function clearGround(
 function groundPasses(work: ClearingWork, ground: Region, firstLayer: number): GroundPasses[] {
   const { cutter, control } = work;
   return insetPieces(ground, work.spacing, cutter.diameter / 2, control).map((piece) => {
-    const passes = passesInsideOut(piece, work.conventional);
+    const passes = passesInsideOut(piece, work.conventional, work.relieve);
     const mayLink = createLinkTest(piece.region);
     const entry = chooseEntry(work, piece, passes, mayLink, firstLayer);
     return { region: piece.region, passes, entry, mayLink };

@@ -18,6 +18,8 @@ export interface ClearingWork extends AnyCutWork {
   /** Distance of passes, mm. */
   readonly spacing: number;
   readonly conventional: boolean;
+  /** What is done to passes along the walls, such as detours into corners. */
+  readonly relieve?: (track: Track) => Track;
 }
 
 /** A helix is at most this share of the cutter's radius wide, so that no core stays in its middle… */

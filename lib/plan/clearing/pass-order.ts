@@ -7,13 +7,24 @@ import type { InsetPiece } from './inset-rings';
  * The closed passes of one piece of ground from its innermost outward, each begun where it is nearest to the end of
  * the one before; the walls come last.
  */
-export function passesInsideOut(piece: InsetPiece, conventional: boolean): Track[] {
+export function passesInsideOut(
+  piece: InsetPiece,
+  conventional: boolean,
+  relieve: (track: Track) => Track = (track) => track,
+): Track[] {
   const out: Track[] = [];
-  visit(piece, conventional, out);
+  clearWithin(piece, conventional, out);
+  appendNearest(tracksOfRegion(piece.region).map(relieve), conventional, out);
   return out;
 }
 
 function visit(piece: InsetPiece, conventional: boolean, out: Track[]): void {
+  clearWithin(piece, conventional, out);
+  appendNearest(tracksOfRegion(piece.region), conventional, out);
+}
+
+/** What lies deeper than a piece's own boundary. */
+function clearWithin(piece: InsetPiece, conventional: boolean, out: Track[]): void {
   const waiting = [...piece.inner];
   while (waiting.length > 0) {
     const next = nearestPiece(waiting, out.at(-1)?.start);
@@ -21,7 +32,6 @@ function visit(piece: InsetPiece, conventional: boolean, out: Track[]): void {
     waiting.splice(waiting.indexOf(next), 1);
   }
   appendNearest(piece.spots.map(trackOfRing), conventional, out);
-  appendNearest(tracksOfRegion(piece.region), conventional, out);
 }
 
 function nearestPiece(pieces: readonly InsetPiece[], from: Vec | undefined): InsetPiece {

@@ -1,4 +1,5 @@
 import { checkCancelled } from '@/lib/base/cancel';
+import type { Region } from '@/lib/geometry/contour';
 import { ringArea } from '@/lib/geometry/measure';
 import { regionPieces } from '@/lib/geometry/pieces';
 import { cutFloor } from '@/lib/job/cut-values';
@@ -6,7 +7,10 @@ import type { ResolvedOutline } from '@/lib/outline/resolve-outlines';
 import type { Finding } from '@/lib/report/report';
 import { cutFinding, cutName, planOf, startPlace, type CutPlan, type CutWork } from '../shared/cut-work';
 import { descentAlong, plungeFindings } from '../shared/entry';
-import { cutLaps } from '../shared/laps';
+import { relieveCorners, wallsOf } from '../shared/corner-relief';
+import { cutLaps, type Laps } from '../shared/laps';
+import { cutLedLaps } from '../shared/laps-with-leads';
+import { placeLeads } from '../shared/place-leads';
 import { growRegion, insetRegion } from '../shared/inset-region';
 import { layerDepths } from '../shared/layers';
 import { createMoveWriter, type MoveWriter } from '../shared/move-writer';
@@ -33,7 +37,7 @@ export function planProfile(work: ProfileWork): CutPlan {
   const { cut } = work;
   const findings: Finding[] = [];
   const rough = linesOf(work, cut.allowance, findings);
-  const finish = cut.finish && cut.allowance > 0 ? linesOf(work, 0, []) : [];
+  const finish = cut.finish ? linesOf(work, 0, []) : [];
   const writer = createMoveWriter(work.limits);
   for (const line of orderInsideOut(rough, startPlace(work))) cutLine(writer, work, line, findings);
   for (const line of orderInsideOut(finish, startPlace(work))) finishLine(writer, work, line);
@@ -62,7 +66,15 @@ function tracksAlong({ cut, cutter }: ProfileWork, outline: ResolvedOutline, all
   // Rings run with their area on the left. Climb keeps the wood that stays on the right (spindle clockwise).
   const climbsAsDrawn = cut.side === 'inside';
   const asDrawn = climbsAsDrawn === (cut.direction === 'climb');
-  return tracksOfRegion(region).map((track) => (asDrawn ? track : reverseTrack(track)));
+  const relieve = reliefOf(cut, cutter.diameter / 2 + allowance, outline.region);
+  return tracksOfRegion(region).map((track) => (asDrawn ? relieve(track) : reverseTrack(relieve(track))));
+}
+
+/** Detours into inner corners, where they were asked for: they turn left along a hole's ring and right along a part's. */
+function reliefOf(cut: ProfileWork['cut'], radius: number, region: Region): (track: Track) => Track {
+  if (cut.relief === 'none') return (track) => track;
+  const walls = wallsOf(region);
+  return (track) => relieveCorners(track, cut.side === 'inside' ? 'left' : 'right', radius, walls);
 }
 
 function tabsOf(
@@ -95,15 +107,27 @@ function cutLine(writer: MoveWriter, work: ProfileWork, line: ProfileLine, findi
   findings.push(...plungeFindings(work, descent, line.track.start));
   const layers = layerDepths(cut.start, cutFloor(job, cut), stepdown);
   const tabs = line.tabs.map(({ lift }) => lift);
-  cutLaps(writer, { track: line.track, top: cut.start, layers, descent, tabs }, startOf(writer, line.track));
+  const laps = { track: line.track, top: cut.start, layers, descent, tabs };
+  runLaps(writer, work, line.outline, laps);
+}
+
+function runLaps(writer: MoveWriter, work: ProfileWork, outline: ResolvedOutline, laps: Laps): void {
+  const from = startOf(writer, laps.track);
+  const led = placeLeads(work.cut, work.cutter.diameter / 2, outline.region, laps, from);
+  if (led) cutLedLaps(writer, laps, led);
+  else cutLaps(writer, laps, from);
 }
 
 /** One pass at full depth along the wall itself. */
-function finishLine(writer: MoveWriter, work: ProfileWork, { track, tabs }: ProfileLine): void {
+function finishLine(writer: MoveWriter, work: ProfileWork, { track, tabs, outline }: ProfileLine): void {
   checkCancelled(work.control);
-  const layers = [cutFloor(work.job, work.cut)];
-  const lifts = tabs.map(({ lift }) => lift);
-  cutLaps(writer, { track, top: work.cut.start, layers, descent: { angle: null }, tabs: lifts });
+  runLaps(writer, work, outline, {
+    track,
+    top: work.cut.start,
+    layers: [cutFloor(work.job, work.cut)],
+    descent: { angle: null },
+    tabs: tabs.map(({ lift }) => lift),
+  });
 }
 
 function startOf(writer: MoveWriter, track: Track): number {

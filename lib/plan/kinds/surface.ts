@@ -7,7 +7,7 @@ import { planOf, type CutPlan, type CutWork } from '../shared/cut-work';
 import { layerDepths } from '../shared/layers';
 import { createLinkTest } from '../shared/links';
 import { createMoveWriter } from '../shared/move-writer';
-import { rasterRows, type RasterLine } from '../shared/raster-lines';
+import { rasterRows, toAndFro } from '../shared/raster-lines';
 import { rectangle } from '../shared/run-out';
 
 /**
@@ -39,11 +39,4 @@ export function planSurface(work: CutWork<'surface'>): CutPlan {
 function surfacedArea({ job, outlines }: CutWork<'surface'>): Region {
   if (outlines.length > 0) return unionRegions(outlines.map(({ region }) => region));
   return [rectangle({ minX: 0, minY: 0, maxX: job.board.x, maxY: job.board.y })];
-}
-
-/** Rows one after another, every second one backwards. */
-export function toAndFro(rows: readonly (readonly RasterLine[])[]): RasterLine[] {
-  return rows.flatMap((row, i) =>
-    i % 2 === 0 ? row : [...row].reverse().map(({ from, to }) => ({ from: to, to: from })),
-  );
 }

@@ -31,9 +31,9 @@ function cutClosed(writer: MoveWriter, laps: Laps, start: number): void {
   let z = 0 - top;
   for (const depth of layers) {
     const ramp = descent.angle === null ? 0 : rampLength(z + depth, descent.angle);
-    run(writer, laps, track, { from: s, to: s + ramp, zFrom: z, zTo: -depth });
+    runStretch(writer, laps, track, { from: s, to: s + ramp, zFrom: z, zTo: -depth });
     s += ramp;
-    run(writer, laps, track, { from: s, to: s + track.length, zFrom: -depth, zTo: -depth });
+    runStretch(writer, laps, track, { from: s, to: s + track.length, zFrom: -depth, zTo: -depth });
     s -= Math.floor(s / track.length) * track.length;
     z = -depth;
   }
@@ -45,13 +45,19 @@ function cutOpen(writer: MoveWriter, laps: Laps): void {
   for (const depth of layers) {
     writer.travelTo(track.start);
     if (descent.angle !== null) zigzag(writer, laps, z, -depth, descent.angle);
-    run(writer, laps, track, { from: 0, to: track.length, zFrom: -depth, zTo: -depth });
+    runStretch(writer, laps, track, { from: 0, to: track.length, zFrom: -depth, zTo: -depth });
     z = -depth;
   }
 }
 
 /** Down at the start of an open track, to and fro in an even number of legs (real angle ≤ the one asked for). */
-function zigzag(writer: MoveWriter, laps: Laps, from: number, to: number, angle: number): void {
+export function zigzag(
+  writer: MoveWriter,
+  laps: Pick<Laps, 'track' | 'tabs'>,
+  from: number,
+  to: number,
+  angle: number,
+): void {
   const { track, tabs } = laps;
   const whole = rampLength(from - to, angle);
   if (whole === 0) return;
@@ -64,13 +70,18 @@ function zigzag(writer: MoveWriter, laps: Laps, from: number, to: number, angle:
     const high = from + ((to - from) * i) / pairs;
     const low = from + ((to - from) * (i + 1)) / pairs;
     const middle = (high + low) / 2;
-    run(writer, laps, track, { from: 0, to: leg, zFrom: high, zTo: middle });
-    run(writer, lapsBack, back, { from: turn, to: track.length, zFrom: middle, zTo: low });
+    runStretch(writer, laps, track, { from: 0, to: leg, zFrom: high, zTo: middle });
+    runStretch(writer, lapsBack, back, { from: turn, to: track.length, zFrom: middle, zTo: low });
   }
 }
 
 /** A stretch with its tabs; a cutter that comes from above goes straight down to where the stretch begins. */
-function run(writer: MoveWriter, { tabs }: Laps, track: Track, stretch: HeightRun): void {
+export function runStretch(
+  writer: MoveWriter,
+  { tabs }: Pick<Laps, 'tabs'>,
+  track: Track,
+  stretch: HeightRun,
+): void {
   if (stretch.to <= stretch.from) return;
   const runs = liftOverTabs(stretch, tabs, track.closed ? track.length : Infinity);
   writer.descendTo(runs[0]?.zFrom ?? stretch.zFrom);
@@ -78,7 +89,7 @@ function run(writer: MoveWriter, { tabs }: Laps, track: Track, stretch: HeightRu
 }
 
 /** A start that is not over a tab, so that the first descent is into the kerf. */
-function clearOfTabs({ track, tabs, layers }: Laps, at: number): number {
+export function clearOfTabs({ track, tabs, layers }: Laps, at: number): number {
   const floor = -(layers.at(-1) ?? 0);
   let place = at;
   for (let tries = 0; tries <= tabs.length; tries++) {

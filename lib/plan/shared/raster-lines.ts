@@ -33,6 +33,13 @@ export function rasterRows(region: Region, angle: number, spacing: number): Rast
   return rows;
 }
 
+/** Rows one after another, every second one backwards. */
+export function toAndFro(rows: readonly (readonly RasterLine[])[]): RasterLine[] {
+  return rows.flatMap((row, i) =>
+    i % 2 === 0 ? row : [...row].reverse().map(({ from, to }) => ({ from: to, to: from })),
+  );
+}
+
 function crossings(rings: readonly (readonly Vec[])[], y: number): number[] {
   const xs: number[] = [];
   for (const ring of rings) {

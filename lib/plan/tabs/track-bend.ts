@@ -1,4 +1,5 @@
-import { cross, dot, type Vec } from '@/lib/geometry/vec';
+import { cross, dot } from '@/lib/geometry/vec';
+import { endDirection, startDirection } from '../shared/piece-direction';
 import { sliceTrack, type Track, type TrackPiece } from '../shared/track';
 
 /** Joints that turn by less than this (radians) come of fitting, not of a corner. */
@@ -28,21 +29,4 @@ function turnBetween(a: TrackPiece, b: TrackPiece): number {
   const from = endDirection(a);
   const to = startDirection(b);
   return Math.abs(Math.atan2(cross(from, to), dot(from, to)));
-}
-
-function startDirection(piece: TrackPiece): Vec {
-  return piece.kind === 'line' ? chord(piece) : tangent(piece.startAngle, piece.sweep);
-}
-
-function endDirection(piece: TrackPiece): Vec {
-  return piece.kind === 'line' ? chord(piece) : tangent(piece.startAngle + piece.sweep, piece.sweep);
-}
-
-function chord({ from, to }: TrackPiece): Vec {
-  return { x: to.x - from.x, y: to.y - from.y };
-}
-
-function tangent(angle: number, sweep: number): Vec {
-  const sign = Math.sign(sweep);
-  return { x: -Math.sin(angle) * sign, y: Math.cos(angle) * sign };
 }
