@@ -11,15 +11,17 @@ const OFFSET_ERROR = 0.02;
 const CHECKED_POINTS = 3;
 
 /**
- * The places of a region that are at least `by` mm inside it. Each piece is checked against the exact distance: the
- * offset curve of a region that is narrower than the inset turns inside out and may seem to leave something.
+ * The places of a region that are at least `by` mm inside it, piece by piece: insets of separate pieces never meet, and
+ * clipping takes more than twice as long for twice as much. Each result is checked against the exact distance: the
+ * offset curve of a piece that is narrower than the inset turns inside out and may seem to leave something.
  */
 export function insetRegion(region: Region, by: number): Region {
-  const inset = offsetRegion(region, -by);
-  if (by === 0) return inset;
-  return regionPieces(inset)
-    .filter(([outer]) => outer && isAway(outer, region, by))
-    .flat();
+  if (by === 0) return region;
+  return regionPieces(region).flatMap((piece) =>
+    regionPieces(offsetRegion(piece, -by))
+      .filter(([outer]) => outer && isAway(outer, piece, by))
+      .flat(),
+  );
 }
 
 /**
