@@ -61,13 +61,14 @@ function clearPiece(
   { passes, entry, mayLink }: GroundPasses,
   depths: readonly number[],
 ): void {
-  let above = -work.cut.start;
+  let above = 0 - work.cut.start;
   depths.forEach((depth, layer) => {
     checkCancelled(work.control);
     const z = -depth;
     // On the first layer the wood still stands, so the cutter comes from above.
-    if (layer === 0 || !linkTo(writer, entryPlace(entry), mayLink))
+    if (layer === 0 || !linkTo(writer, entryPlace(entry), mayLink)) {
       comeDown(writer, entryPlace(entry), above);
+    }
     const onFirst = entry.kind === 'along' && entry.track === passes[0];
     let begin = goDown(writer, entry, above, z, !onFirst);
     passes.forEach((pass, i) => {

@@ -28,6 +28,7 @@ export interface MoveWriter {
   feedTo(p: Vec, z: number): void;
   /** Along joined pieces that begin where the cutter is, z changing evenly by length to `z`. */
   follow(pieces: readonly TrackPiece[], z: number): void;
+  /** Straight up or down rapidly; the caller knows that nothing stands there. */
   rapidTo(z: number): void;
   dwell(seconds: number): void;
   /** Retracts and hands over the moves; none were made if the cutter never travelled. */

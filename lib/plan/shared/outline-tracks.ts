@@ -2,7 +2,7 @@ import { RING_SIMPLIFY } from '@/lib/base/tolerances';
 import type { Contour, Region, Ring, Segment } from '@/lib/geometry/contour';
 import { fitArcs } from '@/lib/geometry/fit-arcs';
 import { flattenContour } from '@/lib/geometry/flatten';
-import { cross, dot, subtract, type Vec } from '@/lib/geometry/vec';
+import { cross, distance, dot, subtract, type Vec } from '@/lib/geometry/vec';
 import {
   arcBetween,
   linePiece,
@@ -16,6 +16,9 @@ import {
 /** How far the arcs that stand for a drawn curve may lie from it, mm. */
 const CURVE_FIT = 0.004;
 
+/** Steps of a flattened curve turn by less than this, corners by more (radians). */
+const LEAST_CORNER = 0.26;
+
 /** The track along a drawn contour, in its drawn direction: lines and arcs exact, other curves within 0.006 mm. */
 export function trackOfContour(contour: Contour): Track {
   const pieces: TrackPiece[] = [];
@@ -28,23 +31,30 @@ export function trackOfContour(contour: Contour): Track {
   return trackOfPieces(contour.start, real, contour.closed && real.length > 0);
 }
 
-/** The tracks round a region's rings, each in the ring's direction and begun at its sharpest corner. */
+/** The tracks round a region's rings, each in the ring's direction and begun where a piece of it begins. */
 export function tracksOfRegion(region: Region): Track[] {
-  return region.filter((ring) => ring.length > 2).map((ring) => trackOfRing(fromSharpestCorner(ring)));
+  return region.filter((ring) => ring.length > 2).map((ring) => trackOfRing(fromPieceStart(ring)));
 }
 
-/** The ring begun at its sharpest corner, so that no arc is divided where the ring happens to start. */
-export function fromSharpestCorner(ring: Ring): Ring {
-  let best = 0;
-  let sharpest = -1;
-  ring.forEach((point, i) => {
-    const turn = turnAt(ring[(i + ring.length - 1) % ring.length]!, point, ring[(i + 1) % ring.length]!);
-    if (turn > sharpest + 1e-6) {
-      sharpest = turn;
-      best = i;
-    }
+/**
+ * The ring begun at its sharpest corner, or where it has none at the start of its longest edge, so that no arc is
+ * divided where the ring happens to start.
+ */
+export function fromPieceStart(ring: Ring): Ring {
+  const at = (i: number) => ring[(i + ring.length) % ring.length]!;
+  const sharpest = largest(ring, (i) => turnAt(at(i - 1), at(i), at(i + 1)));
+  const start = sharpest.value >= LEAST_CORNER ? sharpest : largest(ring, (i) => distance(at(i), at(i + 1)));
+  return start.index === 0 ? ring : [...ring.slice(start.index), ...ring.slice(0, start.index)];
+}
+
+/** The first of those points whose figure is largest, but for rounding. */
+function largest(ring: Ring, figure: (i: number) => number): { index: number; value: number } {
+  let best = { index: 0, value: -Infinity };
+  ring.forEach((_, index) => {
+    const value = figure(index);
+    if (value > best.value + 1e-6) best = { index, value };
   });
-  return best === 0 ? ring : [...ring.slice(best), ...ring.slice(0, best)];
+  return best;
 }
 
 function turnAt(before: Vec, at: Vec, after: Vec): number {

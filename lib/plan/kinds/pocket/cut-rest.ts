@@ -36,7 +36,7 @@ export function cutRest(
   const mayLink = createLinkTest(ground);
   const stops = places.map((passes) => ({ entry: passes[0]!.start, exit: trackEnd(passes.at(-1)!) }));
   for (const { index } of orderTour(stops, writer.position() ?? stops[0]?.entry ?? { x: 0, y: 0 })) {
-    let above = -cut.start;
+    let above = 0 - cut.start;
     for (const depth of depths) {
       checkCancelled(control);
       for (const pass of places[index]!.map((track) => (work.conventional ? reverseTrack(track) : track))) {

@@ -28,7 +28,6 @@ export function planPocket(work: PocketWork): CutPlan {
   const { job, cut, cutter } = work;
   const radius = cutter.diameter / 2;
   const area = pocketArea(job, cut, work.resolved);
-
   const depths = layerDepths(cut.start, cutFloor(job, cut), work.stepdown);
   const ground = insetRegion(area, radius + cut.allowance);
   const findings = doesNotFit(work, area, ground);
