@@ -34,15 +34,11 @@ export function NewProjectDialog({ way, onWayChange }: NewProjectDialogProps) {
         onChange={onWayChange}
         pages={[
           { value: 'empty', label: 'Empty board', content: <StartEmpty onMade={open} /> },
-          ...(readDrawing
-            ? [
-                {
-                  value: 'file' as const,
-                  label: 'SVG file',
-                  content: <StartFromFile readDrawing={readDrawing} onMade={open} />,
-                },
-              ]
-            : []),
+          {
+            value: 'file',
+            label: 'SVG file',
+            content: <StartFromFile readDrawing={readDrawing} onMade={open} />,
+          },
           { value: 'example', label: 'Example', content: <StartFromExample onMade={open} /> },
         ]}
       />

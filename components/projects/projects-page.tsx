@@ -13,7 +13,6 @@ import type { ProjectItem } from '@/lib/contracts/project';
 import { FilterBar, type ListFilter } from './filter-bar';
 import { NewProjectDialog, type NewProjectWay } from './new-project-dialog';
 import { ProjectCard } from './project-card';
-import { readDrawing } from './read-drawing';
 import { sortProjects } from './sort-projects';
 import { useLaterValue } from './use-later-value';
 import { useAllPages } from './use-all-pages';
@@ -127,7 +126,7 @@ function NoProjects({ onMake }: { onMake: (way: NewProjectWay) => void }) {
           <Button variant="primary" onClick={() => onMake('example')}>
             Open an example
           </Button>
-          {readDrawing ? <Button onClick={() => onMake('file')}>From an SVG file</Button> : null}
+          <Button onClick={() => onMake('file')}>From an SVG file</Button>
           <Button onClick={() => onMake('empty')}>From an empty board</Button>
         </>
       }

@@ -1,4 +1,11 @@
+import { fail, ok } from '@/lib/base/result';
+import { importSvg } from '@/lib/import/svg/import-svg';
 import type { ReadDrawing } from './drawing';
 
-/** How drawing files are read; null while nothing reads them, and then beginning from a file is not offered. */
-export const readDrawing: ReadDrawing | null = null;
+/** Reads an SVG file as outlines. */
+export const readDrawing: ReadDrawing = (text, { scale, at }) => {
+  const read = importSvg(text, { scale, at });
+  if (!read.ok) return fail(`Line ${read.error.line}: ${read.error.message}`);
+  const { outlines, size, leftOut } = read.value;
+  return ok({ outlines, size, leftOut: leftOut.map(({ line, what }) => ({ what, where: `line ${line}` })) });
+};
