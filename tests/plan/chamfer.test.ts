@@ -116,4 +116,11 @@ describe('chamfer', () => {
       stepOf(planned, 'c').moves.filter(({ kind }) => kind === 'arc').length;
     expect(passes(many)).toBe(2 * passes(one));
   });
+
+  it('says so where a hole is too narrow for the point to stand clear of its walls', () => {
+    const d = 'M20 20 H100 V80 H20 Z M40 40 V40.4 H60 V40 Z';
+    const planned = plan([path('p', d)], [{ ...BEVEL, outlines: ['p'], side: 'outside' }]);
+    expect(planned.findings).toMatchObject([{ code: 'cutter-too-large', cut: 'c', face: 'A' }]);
+    expect(planned.steps).toHaveLength(1);
+  });
 });

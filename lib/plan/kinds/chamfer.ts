@@ -16,6 +16,7 @@ import { cutLaps } from '../shared/laps';
 import { growRegion, insetRegion } from '../shared/inset-region';
 import { layerDepths } from '../shared/layers';
 import { createMoveWriter } from '../shared/move-writer';
+import { narrowOpenings } from '../shared/narrow-openings';
 import { orderInsideOut } from '../shared/order-tracks';
 import { tracksOfRegion } from '../shared/outline-tracks';
 import { reverseTrack } from '../shared/track';
@@ -54,13 +55,12 @@ export function planChamfer(work: CutWork<'chamfer'>): CutPlan {
     checkCancelled(work.control);
     const outside = cut.side === 'outside';
     const region = outside ? growRegion(outline.region, offset) : insetRegion(outline.region, offset);
-    const tracks = tracksOfRegion(region);
-    if (tracks.length === 0) {
-      const message = `${cutName(work)}: the point of ${cutter.name} does not fit into '${outline.name}'.`;
-      findings.push(cutFinding(work, 'cutter-too-large', message, outline.contours[0]?.start));
+    for (const opening of narrowOpenings(outline.region, cut.side, offset)) {
+      const message = `${cutName(work)}: the point of ${cutter.name} does not fit into an opening of '${outline.name}'.`;
+      findings.push(cutFinding(work, 'cutter-too-large', message, opening[0]?.[0]));
     }
     // The wood that stays lies left of an outer ring for `outside`; climb wants it on the right.
-    return tracks.map((track) => ({ track: outside ? reverseTrack(track) : track }));
+    return tracksOfRegion(region).map((track) => ({ track: outside ? reverseTrack(track) : track }));
   });
 
   const writer = createMoveWriter(work.limits);

@@ -1,7 +1,5 @@
 import { checkCancelled } from '@/lib/base/cancel';
 import type { Region } from '@/lib/geometry/contour';
-import { ringArea } from '@/lib/geometry/measure';
-import { regionPieces } from '@/lib/geometry/pieces';
 import { cutFloor } from '@/lib/job/cut-values';
 import type { ResolvedOutline } from '@/lib/outline/resolve-outlines';
 import type { Finding } from '@/lib/report/report';
@@ -14,6 +12,7 @@ import { placeLeads } from '../shared/place-leads';
 import { growRegion, insetRegion } from '../shared/inset-region';
 import { layerDepths } from '../shared/layers';
 import { createMoveWriter, type MoveWriter } from '../shared/move-writer';
+import { narrowOpenings } from '../shared/narrow-openings';
 import { orderInsideOut } from '../shared/order-tracks';
 import { trackOfContour, tracksOfRegion } from '../shared/outline-tracks';
 import { nearestOnTrack, reverseTrack, type Track } from '../shared/track';
@@ -139,15 +138,8 @@ function startOf(writer: MoveWriter, track: Track): number {
 function doesNotFit(work: ProfileWork, outline: ResolvedOutline, allowance: number): Finding[] {
   const { cut, cutter } = work;
   if (cut.side === 'on') return [];
-  const radius = cutter.diameter / 2 + allowance;
-  const openings =
-    cut.side === 'inside'
-      ? regionPieces(outline.region)
-      : outline.region.filter((ring) => ringArea(ring) < 0).map((hole) => [[...hole].reverse()]);
-  return openings
-    .filter((opening) => insetRegion(opening, radius).length === 0)
-    .map((opening) => {
-      const message = `${cutName(work)}: ${cutter.name} does not fit into an opening of '${outline.name}'.`;
-      return cutFinding(work, 'cutter-too-large', message, opening[0]?.[0]);
-    });
+  return narrowOpenings(outline.region, cut.side, cutter.diameter / 2 + allowance).map((opening) => {
+    const message = `${cutName(work)}: ${cutter.name} does not fit into an opening of '${outline.name}'.`;
+    return cutFinding(work, 'cutter-too-large', message, opening[0]?.[0]);
+  });
 }
