@@ -89,8 +89,6 @@ function SelectedPanel() {
   const selection = useEditorState(({ session }) => session.selection);
   const cut = job.cuts.find(({ id }) => id === selection.cut);
   const outlines = job.outlines.filter(({ id }) => selection.outlines.includes(id));
-  if (outlines.length > 0 && (!cut || outlines.some(({ id }) => !cut.outlines.includes(id))))
-    return <OutlineInspector key={selection.outlines.join()} job={job} outlines={outlines} />;
   if (cut) return <CutInspector key={cut.id} job={job} cut={cut} />;
   if (outlines.length > 0)
     return <OutlineInspector key={selection.outlines.join()} job={job} outlines={outlines} />;

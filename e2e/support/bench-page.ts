@@ -48,7 +48,7 @@ export async function openBench(page: Page, projectId: string, query = ''): Prom
     },
     inspect: (name) =>
       page.getByRole('navigation', { name: 'Pages of the inspector' }).getByRole('button', { name }).click(),
-    saved: () => expect(page.getByRole('status').filter({ hasText: /^saved$/ })).toBeVisible(),
+    saved: () => expect(page.getByRole('status').filter({ hasText: /^\s*saved$/ })).toBeVisible(),
     job: async () => (await savedJob(page.request, projectId)).job,
   };
   return bench;

@@ -37,7 +37,8 @@ export function parseLength(text: string, unit: FieldUnit, current?: number): Re
   try {
     const value = new SumReader(tokensOf(text), unit).readAll(current);
     if (!Number.isFinite(value)) throw new Unreadable('This divides by nothing.');
-    return ok(value);
+    // 3/4 in is 19.05 mm, not 19.049999999999997: what people type has no more digits than these.
+    return ok(Number(value.toPrecision(14)));
   } catch (error) {
     if (error instanceof Unreadable) return fail(error.message);
     throw error;

@@ -36,7 +36,7 @@ export function OutlinesPanel() {
                 )}
                 onClick={(event) => {
                   const both = event.shiftKey || event.ctrlKey || event.metaKey;
-                  editor.select({ outlines: both ? toggled(selected, id) : [id] });
+                  editor.select(both ? { outlines: toggled(selected, id) } : { outlines: [id], cut: null });
                 }}
               >
                 {isSelected ? <Icon name="check" size={16} /> : null}

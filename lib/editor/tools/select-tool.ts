@@ -46,7 +46,7 @@ function press(down: ToolPointer, context: ToolContext): ToolStep<SelectState> {
   const chosen = context.selection.outlines;
   if (chosen.includes(target.id) && !down.shift) return stay({ name: 'pressed', down, ids: chosen });
   const ids = down.shift ? toggled(chosen, target.id) : [target.id];
-  return { state: { name: 'pressed', down, ids }, effects: [selecting(ids)] };
+  return { state: { name: 'pressed', down, ids }, effects: [selecting(ids, down.shift)] };
 }
 
 function drag(state: SelectState, pointer: ToolPointer, context: ToolContext): ToolStep<SelectState> {
@@ -83,7 +83,7 @@ function release(state: SelectState, pointer: ToolPointer, context: ToolContext)
         effects: [
           isClick && !state.adds
             ? { kind: 'select', selection: { outlines: [], cut: null } }
-            : selecting(ids),
+            : selecting(ids, state.adds),
         ],
       };
     }
@@ -145,6 +145,7 @@ function toggled(ids: readonly string[], id: string): readonly string[] {
   return ids.includes(id) ? ids.filter((other) => other !== id) : [...ids, id];
 }
 
-function selecting(outlines: readonly string[]): ToolEffect {
-  return { kind: 'select', selection: { outlines } };
+/** What is selected anew is what the inspector is about; what is added keeps the cut, which may take it up. */
+function selecting(outlines: readonly string[], adds: boolean): ToolEffect {
+  return { kind: 'select', selection: adds ? { outlines } : { outlines, cut: null } };
 }
