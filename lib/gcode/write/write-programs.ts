@@ -32,6 +32,9 @@ export function writePrograms(job: Job, steps: readonly CutMoves[], info: Progra
   });
 }
 
+/** What a line number and its blank take of a line: N and five digits. */
+const NUMBER_ROOM = 7;
+
 interface Naming {
   readonly file: string;
   readonly index: number;
@@ -45,7 +48,8 @@ function writeProgram(
 ): { text: string; lineMap: LineMapEntry[] } {
   const { machine } = job;
   const { controller } = machine;
-  const dialect = DIALECTS[controller.dialect];
+  const own = DIALECTS[controller.dialect];
+  const dialect = controller.lineNumbers ? { ...own, lineLength: own.lineLength - NUMBER_ROOM } : own;
   const lines: string[] = [];
   const lineMap: LineMapEntry[] = [];
   const push = (line: string): void => void lines.push(line);
