@@ -12,7 +12,9 @@ interface LineFontFile {
   /** Marks that are set on letters: path data about x = 0. */
   readonly marks: Readonly<Record<string, string>>;
   /** Character → letter, mark, and how far the mark is moved. */
-  readonly composites: Readonly<Record<string, readonly [letter: string, mark: string, x: number, y: number]>>;
+  readonly composites: Readonly<
+    Record<string, readonly [letter: string, mark: string, x: number, y: number]>
+  >;
   /** Left letter + right letter → what is added to the advance. */
   readonly kerning: Readonly<Record<string, number>>;
 }
@@ -46,9 +48,7 @@ function drawGlyph(file: LineFontFile, character: string): Omit<Glyph, 'index'> 
   const contours = strokesOf(strokes);
   if (!composite) return { advance, contours };
   const [, mark, x, y] = composite;
-  const placed = strokesOf(file.marks[mark]!).map((contour) =>
-    transformContour(contour, [1, 0, 0, 1, x, y]),
-  );
+  const placed = strokesOf(file.marks[mark]!).map((contour) => transformContour(contour, [1, 0, 0, 1, x, y]));
   return { advance, contours: [...contours, ...placed] };
 }
 

@@ -76,10 +76,10 @@ export function polygonContour({ cx, cy, radius, sides, rotate: turn }: ShapeOf<
     return vec(cx + radius * Math.cos(angle), cy + radius * Math.sin(angle));
   };
   const start = corner(0);
-  const segments = Array.from(
-    { length: sides },
-    (_, i): Segment => ({ kind: 'line', to: i === sides - 1 ? start : corner(i + 1) }),
-  );
+  const segments = Array.from({ length: sides }, (_, i): Segment => ({
+    kind: 'line',
+    to: i === sides - 1 ? start : corner(i + 1),
+  }));
   return { start, segments, closed: true };
 }
 
