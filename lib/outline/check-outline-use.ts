@@ -25,7 +25,7 @@ export function checkOutlineUse(job: Job, find: (id: string) => ShapeContours | 
 }
 
 function unfit(cut: Cut, outline: Outline, shape: ShapeContours): string | null {
-  const use = shapeIn(cut);
+  const use = needOf(cut);
   const name = `'${outline.name || outline.id}'`;
   if (shape.points.length > 0 && use !== 'places') {
     return `${name} holds points; ${described(cut)} needs ${use === 'closed' ? 'a closed path' : 'a path'}.`;
@@ -36,7 +36,7 @@ function unfit(cut: Cut, outline: Outline, shape: ShapeContours): string | null 
   return null;
 }
 
-function shapeIn(cut: Cut): Use {
+function needOf(cut: Cut): Use {
   if (cut.kind === 'drill') return 'places';
   return cut.kind === 'engrave' || (cut.kind === 'profile' && cut.side === 'on') ? 'lines' : 'closed';
 }
