@@ -9,7 +9,6 @@ const core = {
   'lib/job': ['lib/base', 'lib/report'],
   'lib/outline': ['lib/base', 'lib/geometry', 'lib/job', 'lib/report'],
   'lib/import': ['lib/base', 'lib/geometry', 'lib/job', 'lib/report'],
-  'lib/export': ['lib/base', 'lib/geometry', 'lib/job', 'lib/report'],
   'lib/moves': ['lib/base', 'lib/geometry'],
   'lib/plan': ['lib/base', 'lib/geometry', 'lib/job', 'lib/report', 'lib/outline', 'lib/moves'],
   'lib/gcode/write': ['lib/base', 'lib/geometry', 'lib/job', 'lib/report', 'lib/moves'],
