@@ -72,7 +72,7 @@ export function PlanView({ view, onView }: { view: View | null; onView: (view: V
   );
   const tabs = useMemo(() => drawnTabs(job, session.face, planning), [job, session.face, planning]);
   const pins = usePins(job, session.face);
-  const draftLines = useMemo(() => linesOf(draft, fonts), [draft, fonts]);
+  const drawnDraft = useMemo(() => (draft ? { draft, lines: linesOf(draft, fonts) } : null), [draft, fonts]);
 
   return (
     <div
@@ -96,7 +96,7 @@ export function PlanView({ view, onView }: { view: View | null; onView: (view: V
             pins={pins}
             picture={picture}
             dimmed={!planning.current}
-            draft={draft ? { draft, lines: draftLines } : null}
+            draft={drawnDraft}
             panning={panning}
             onView={onView}
             onTool={(event: ToolEvent) => runner.send(event)}

@@ -1,7 +1,7 @@
 'use client';
 
 import type Konva from 'konva';
-import { useMemo, useRef, useState } from 'react';
+import { useCallback, useMemo, useRef, useState } from 'react';
 import { Layer, Shape, Stage } from 'react-konva';
 import { pickFilled, pickLine } from '@/lib/editor/pick';
 import type { Scene } from '@/lib/editor/scene';
@@ -72,6 +72,46 @@ export function PlanCanvas(props: PlanCanvasProps) {
     },
   });
 
+  // One callback a layer: Konva draws a layer anew only when its own things have changed, not on every move of a pointer.
+  const { picture, paths, tabs, pins, dimmed } = props;
+  const { show, selection, section, face } = session;
+  const hovered = session.tool === 'select' ? hover.outline : null;
+  const drawSheet = useCallback(
+    (context: Context) => {
+      drawBoard(context, view, job.board, picture, palette);
+      if (show.grid) drawGrid(context, view, size, job.display, palette);
+      drawDimensions(context, view, job.board, (mm) => drawingLength(mm, job.display), palette);
+    },
+    [view, size, job.board, job.display, picture, show.grid, palette],
+  );
+  const drawShapes = useCallback(
+    (context: Context) => {
+      const look = { selected: new Set(selection.outlines), hovered, farFace: show.farFace };
+      drawOutlines(context, view, scene, look, palette);
+    },
+    [view, scene, selection.outlines, hovered, show.farFace, palette],
+  );
+  const drawCuts = useCallback(
+    (context: Context) => {
+      if (show.paths) {
+        drawPaths(context, view, paths, { cut: selection.cut, rapids: show.rapids, dimmed }, palette);
+        drawTabs(context, view, tabs, palette);
+      }
+      if (job.setups[face]) drawZero(context, view, zeroOf(job, face), face, palette);
+    },
+    [view, paths, tabs, selection.cut, show.paths, show.rapids, dimmed, job, face, palette],
+  );
+  const snapped = isDrawing && hover.snapped?.name ? hover.snapped.at : null;
+  const drawOver = useCallback(
+    (context: Context) => {
+      drawSectionLine(context, view, section, job.board, palette);
+      drawPins(context, view, pins, palette);
+      if (draft) drawDraft(context, view, draft.draft, draft.lines, palette);
+      if (snapped) drawSnap(context, view, snapped, palette);
+    },
+    [view, section, job.board, pins, draft, snapped, palette],
+  );
+
   return (
     <div
       ref={frame}
@@ -80,66 +120,24 @@ export function PlanCanvas(props: PlanCanvasProps) {
       {...handlers}
     >
       <Stage width={size.width} height={size.height} listening={false}>
-        <Layer listening={false}>
-          <Drawing
-            draw={(context) => {
-              drawBoard(context, view, job.board, props.picture, palette);
-              if (session.show.grid) drawGrid(context, view, size, job.display, palette);
-              drawDimensions(context, view, job.board, (mm) => drawingLength(mm, job.display), palette);
-            }}
-          />
-        </Layer>
-        <Layer listening={false}>
-          <Drawing
-            draw={(context) => {
-              drawOutlines(
-                context,
-                view,
-                scene,
-                {
-                  selected: new Set(session.selection.outlines),
-                  hovered: session.tool === 'select' ? hover.outline : null,
-                  farFace: session.show.farFace,
-                },
-                palette,
-              );
-              if (session.show.paths) {
-                const { rapids } = session.show;
-                const look = { cut: session.selection.cut, rapids, dimmed: props.dimmed };
-                drawPaths(context, view, props.paths, look, palette);
-                drawTabs(context, view, props.tabs, palette);
-              }
-              if (job.setups[session.face])
-                drawZero(context, view, zeroOf(job, session.face), session.face, palette);
-            }}
-          />
-        </Layer>
-        <Layer listening={false}>
-          <Drawing
-            draw={(context) => {
-              drawSectionLine(context, view, session.section, job.board, palette);
-              drawPins(context, view, props.pins, palette);
-              if (draft) drawDraft(context, view, draft.draft, draft.lines, palette);
-              if (isDrawing && hover.snapped?.name) drawSnap(context, view, hover.snapped.at, palette);
-            }}
-          />
-        </Layer>
+        {[drawSheet, drawShapes, drawCuts, drawOver].map((draw, index) => (
+          <Layer key={index} listening={false}>
+            <Drawing draw={draw} />
+          </Layer>
+        ))}
       </Stage>
     </div>
   );
 }
 
+type Context = CanvasRenderingContext2D;
+
 const NO_HOVER = { snapped: null, outline: null };
 
-/** One custom shape that draws straight into its layer's canvas: a layer is redrawn only when its own things change. */
-function Drawing({ draw }: { draw: (context: CanvasRenderingContext2D) => void }) {
-  return (
-    <Shape
-      listening={false}
-      perfectDrawEnabled={false}
-      sceneFunc={(context: Konva.Context) => draw(context._context)}
-    />
-  );
+/** One custom shape that draws straight into its layer's canvas. */
+function Drawing({ draw }: { draw: (context: Context) => void }) {
+  const sceneFunc = useCallback((context: Konva.Context) => draw(context._context), [draw]);
+  return <Shape listening={false} perfectDrawEnabled={false} sceneFunc={sceneFunc} />;
 }
 
 /** What a pointer may snap to; what is being moved does not snap to itself. */

@@ -133,7 +133,7 @@ function heightHint(
   if (height !== 'auto') return 'Above the far face. Write ‘auto’ to have it worked out.';
   if (places.length === 0) return 'Worked out from what the far face’s cuts take away.';
   const highest = places.reduce((best, place) => (place.height > best.height ? place : best));
-  const { height: top, farDepth } = highest;
+  const [top = 0, farDepth = 0] = [highest.height, highest.farDepth].map((mm) => Number(mm.toFixed(1)));
   if (farDepth <= 0) return `${lengthWithUnit(top, job.display)}: the far face is not cut there.`;
   return `${lengthWithUnit(top, job.display)}: clears what the far face’s cuts take (${formatLength(farDepth, job.display)}).`;
 }
