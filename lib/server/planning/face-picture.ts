@@ -48,8 +48,9 @@ function drawCut(job: Job, cut: Cut, outlines: ResolvedOutlines): string {
   const floor = () => tone(cutFloor(job, cut) / job.board.z);
   switch (cut.kind) {
     case 'pocket':
-    case 'bore':
     case 'taper-engrave':
+      return together(drawn, floor());
+    case 'bore':
       return drawn.map((outline) => area(outline, floor())).join('');
     case 'surface':
       return drawn.length > 0
@@ -75,6 +76,14 @@ function hiddenLines(cut: Cut, outlines: ResolvedOutlines, face: Face): string {
     .join('');
 }
 
+/** Outlines of one cut combined even-odd, as they are cut: one inside another is an island. */
+function together(drawn: readonly ResolvedOutline[], fill: string): string {
+  const [only] = drawn;
+  if (drawn.length === 1 && only) return area(only, fill);
+  const contours = drawn.flatMap((outline) => outline.contours);
+  return pathElement({ contours }, `fill="${fill}" fill-rule="evenodd" stroke-width="0.8"`);
+}
+
 function area(outline: ResolvedOutline, fill: string): string {
   return pathElement(outline, `fill="${fill}" fill-rule="${outline.fillRule}" stroke-width="0.8"`);
 }
@@ -92,7 +101,7 @@ function holes(job: Job, cut: Cut, outline: ResolvedOutline, fill: string): stri
   return circles.join('') + area(outline, fill);
 }
 
-function pathElement({ contours }: ResolvedOutline, attributes: string): string {
+function pathElement({ contours }: Pick<ResolvedOutline, 'contours'>, attributes: string): string {
   if (contours.length === 0) return '';
   return `<path d="${contours.map(pathData).join('')}" ${attributes} vector-effect="non-scaling-stroke"/>`;
 }
