@@ -14,7 +14,7 @@ const SHAPES: Record<string, CutterShape> = {
   'drill of 118°': { kind: 'cone', radius: 2.5, tip: 0, steepness: 0.6009 },
 };
 
-function swept(shape: CutterShape, chain: readonly MotionPoint[], step = 0.75) {
+function swept(shape: CutterShape, chain: readonly MotionPoint[], step = 0.5) {
   const field = createHeightField({ x: 0, y: 0, width: 30, height: 20 }, step);
   const sweeper = new Sweeper(field, shape);
   sweeper.moveTo(chain[0]!);
@@ -72,7 +72,7 @@ describe('sweeping chains of straight motions', () => {
           expect(matches, `cell (${x}, ${y}): ${field.z[cell]} against ${expected}`).toBe(true);
         }
       }),
-      { seed: 20260, numRuns: 16, endOnFailure: true },
+      { seed: 20260, numRuns: 24, endOnFailure: true },
     );
   });
 
